@@ -198,9 +198,9 @@ struct formula_functions {
   CONVELOPE_FUNCTION static constexpr T power(const T& x) {
     return math::power<P, Q>(x);
   }
-  template <int N, class T>
+  template <int Exponent, class T>
   CONVELOPE_FUNCTION static constexpr T joined(const T& a, const T& b) {
-    return math::joined<N>(a, b);
+    return math::joined<Exponent>(a, b);
   }
 };
 
@@ -226,9 +226,9 @@ struct correlation_on : formula_functions {
   }
 
   /// Calls f.template operator()<Kind...>() with the input kinds: for the catalogue.
-  template <class F>
-  static constexpr decltype(auto) with_input_kinds(F f) {
-    return f.template operator()<Inputs...>();
+  template <class Use>
+  static constexpr decltype(auto) with_input_kinds(Use use) {
+    return use.template operator()<Inputs...>();
   }
 
  private:

@@ -78,12 +78,12 @@ struct envelope_of {
   }
 
  private:
-  template <class T, class... Ks, std::size_t... I, class... X>
-  CONVELOPE_FUNCTION constexpr bits_t<T> check_each(std::index_sequence<I...>,
+  template <class T, class... Ks, std::size_t... Index, class... X>
+  CONVELOPE_FUNCTION constexpr bits_t<T> check_each(std::index_sequence<Index...>,
                                                     const X&... x) const {
     bits_t<T> bits(std::uint64_t{0});
-    ((bits = bits | one<T>(std::get<I>(limits), static_cast<int>(I),
-                           std::get<I>(limits).template number<Ks...>(x...))),
+    ((bits = bits | one<T>(std::get<Index>(limits), static_cast<int>(Index),
+                           std::get<Index>(limits).template number<Ks...>(x...))),
      ...);
     return bits;
   }

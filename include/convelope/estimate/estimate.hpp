@@ -62,6 +62,10 @@ class estimate {
   CONVELOPE_FUNCTION friend constexpr estimate operator-(const estimate& a, const estimate& b) {
     return joined(a, b, T(a.si_ - b.si_));
   }
+  template <has_kind B>
+  friend void operator+(const estimate& a, const B& b) = delete;  // two kinds don't mix
+  template <has_kind B>
+  friend void operator-(const estimate& a, const B& b) = delete;
 
  private:
   CONVELOPE_FUNCTION static constexpr estimate joined(const estimate& a, const estimate& b,
@@ -129,6 +133,9 @@ template <class Info, class... P>
 CONVELOPE_FUNCTION constexpr const Info* first_given(const Info* a, P... rest) {
   return a != nullptr ? a : first_given<Info>(rest...);
 }
+
+template <class... A>
+using number_type = common_scalar_t<typename A::value_type...>;
 
 /// A product or quotient of the arguments, as a typed number if all are typed, else as an
 /// estimate that inherits every verdict and combines every scatter.

@@ -24,10 +24,11 @@ inline constexpr std::uint64_t not_finite = one << 58;
 inline constexpr std::uint64_t refused = one << 59;
 inline constexpr std::uint64_t scatter_not_stated = one << 60;
 inline constexpr std::uint64_t input_outside = one << 61;
+inline constexpr std::uint64_t impossible = one << 62;
 inline constexpr std::uint64_t correlations_mask = (one << fluid_start) - 1;
 // All that makes an answer unsupported; an unstated scatter does not.
 inline constexpr std::uint64_t outside =
-    correlations_mask | fluid_mask | not_finite | refused | input_outside;
+    correlations_mask | fluid_mask | not_finite | refused | input_outside | impossible;
 
 constexpr std::uint64_t of_correlation(int slot, int limit, side s) {
   return one << (slot * slot_width + 2 * limit + static_cast<int>(s));
@@ -69,6 +70,10 @@ class verdict<std::uint64_t> {
   CONVELOPE_FUNCTION constexpr bool inside() const { return (bits_ & detail::word::outside) == 0; }
   CONVELOPE_FUNCTION constexpr bool finite_input() const {
     return (bits_ & detail::word::not_finite) == 0;
+  }
+  /// A length, velocity or temperature that can't be: zero or negative where it must be positive.
+  CONVELOPE_FUNCTION constexpr bool possible_input() const {
+    return (bits_ & detail::word::impossible) == 0;
   }
   CONVELOPE_FUNCTION constexpr bool refused() const {
     return (bits_ & detail::word::refused) != 0;

@@ -33,12 +33,12 @@ enum class expansion_rule : unsigned char {
 
 /// A fluid: values(T, p) on any scalar type, check(T, p) with the bits of the limits it leaves,
 /// info() for people, and where its expansion coefficient is taken. A host's own struct will do.
-template <class F>
-concept fluid = requires(const F& f, const double& x) {
+template <class Fluid>
+concept fluid = requires(const Fluid& f, const double& x) {
   { f.values(x, x) } -> std::same_as<fluid_values<double>>;
   { f.check(x, x) } -> std::same_as<std::uint64_t>;
   { f.info() } -> std::convertible_to<const fluid_info*>;
-  { F::expansion_at } -> std::convertible_to<expansion_rule>;
+  { Fluid::expansion_at } -> std::convertible_to<expansion_rule>;
 };
 
 /// The verdict bits of limit number i of a fluid: low <= x <= high.
@@ -106,8 +106,8 @@ class fluid_state {
 };
 
 /// The fluid's state at a temperature (of any station) and an absolute pressure.
-template <fluid F, temperature_kind K, class T>
-CONVELOPE_FUNCTION constexpr fluid_state<T> state_of(const F& f, const typed<K, T>& temperature,
+template <fluid Fluid, temperature_kind K, class T>
+CONVELOPE_FUNCTION constexpr fluid_state<T> state_of(const Fluid& f, const typed<K, T>& temperature,
                                                      const typed<kinds::pressure, T>& p) {
   using W = working_t<T>;
   const auto raw = f.values(W(temperature.si()), W(p.si()));
@@ -116,9 +116,9 @@ CONVELOPE_FUNCTION constexpr fluid_state<T> state_of(const F& f, const typed<K, 
                          number(raw.viscosity), number(raw.expansion)},
                         bits_t<T>(f.check(W(temperature.si()), W(p.si()))), f.info());
 }
-template <fluid F, temperature_kind K, class T>
+template <fluid Fluid, temperature_kind K, class T>
   requires(!std::is_same_v<T, double>)
-CONVELOPE_FUNCTION constexpr fluid_state<T> state_of(const F& f, const typed<K, T>& temperature,
+CONVELOPE_FUNCTION constexpr fluid_state<T> state_of(const Fluid& f, const typed<K, T>& temperature,
                                                      const typed<kinds::pressure>& p) {
   return state_of(f, temperature,
                   typed<kinds::pressure, T>::from_si(scalar_adaptor<T>::constant(p.si())));

@@ -42,6 +42,17 @@ struct area_over_perimeter : length_scale {
   static constexpr const char* symbol = "A/P";
   static constexpr const char* words = "area over perimeter";
 };
+/// Of a square plate; the mean of the two sides of a rectangle. Not area over perimeter, which is a
+/// quarter of it on a square.
+struct plate_side : length_scale {
+  static constexpr const char* symbol = "s";
+  static constexpr const char* words = "side of the plate";
+};
+/// Of a long strip, across.
+struct strip_width : length_scale {
+  static constexpr const char* symbol = "W";
+  static constexpr const char* words = "width of the strip";
+};
 /// Between two walls.
 struct gap : length_scale {
   static constexpr const char* symbol = "b";
@@ -62,6 +73,11 @@ struct distance_from_inlet : length_scale {
   static constexpr const char* words = "distance from the inlet";
   using velocity = mean_velocity;
 };
+/// Mean diameter of the turn of a coiled tube.
+struct coil_diameter : length_scale {
+  static constexpr const char* symbol = "Dc";
+  static constexpr const char* words = "mean diameter of the coil";
+};
 /// Equivalent sand-grain roughness.
 struct roughness : length_scale {
   static constexpr const char* symbol = "ks";
@@ -76,10 +92,13 @@ inline constexpr gate<kinds::plate_length> plate_length{};
 inline constexpr gate<kinds::distance_from_edge> distance_from_edge{};
 inline constexpr gate<kinds::height> height{};
 inline constexpr gate<kinds::area_over_perimeter> area_over_perimeter{};
+inline constexpr gate<kinds::plate_side> plate_side{};
+inline constexpr gate<kinds::strip_width> strip_width{};
 inline constexpr gate<kinds::gap> gap{};
 inline constexpr gate<kinds::radius> radius{};
 inline constexpr gate<kinds::duct_length> duct_length{};
 inline constexpr gate<kinds::distance_from_inlet> distance_from_inlet{};
+inline constexpr gate<kinds::coil_diameter> coil_diameter{};
 inline constexpr gate<kinds::roughness> roughness{};
 
 /// A length that a Reynolds, Nusselt or Rayleigh number can be based on.

@@ -62,6 +62,13 @@ struct surface_tension {
   static constexpr const char* words = "surface tension";
   static constexpr const char* unit = "N/m";
 };
+/// Acceleration that drives buoyancy.
+struct gravity {
+  using unit_type = boost::units::si::acceleration;
+  static constexpr const char* symbol = "g";
+  static constexpr const char* words = "gravitational acceleration";
+  static constexpr const char* unit = "m/s2";
+};
 }  // namespace kinds
 
 inline constexpr gate<kinds::pressure> pressure{};
@@ -73,6 +80,10 @@ inline constexpr gate<kinds::kinematic_viscosity> kinematic_viscosity{};
 inline constexpr gate<kinds::thermal_diffusivity> thermal_diffusivity{};
 inline constexpr gate<kinds::expansion_coefficient> expansion_coefficient{};
 inline constexpr gate<kinds::surface_tension> surface_tension{};
+inline constexpr gate<kinds::gravity> gravity{};
+/// 9.80665 m/s2, the conventional value (3rd CGPM, 1901).
+inline constexpr typed<kinds::gravity> standard_gravity =
+    typed<kinds::gravity>::from_si(9.80665);
 
 }  // namespace v0
 }  // namespace convelope

@@ -55,6 +55,14 @@ struct rayleigh : pure_number {
   static constexpr const char* words = "Rayleigh number";
   static constexpr const char* on_length = L::words;
 };
+/// g beta q L^4 / (k nu alpha): the Rayleigh number with q L/k for the temperature difference
+template <length_kind L>
+struct flux_rayleigh : pure_number {
+  static constexpr const char* symbol = "Ra*";
+  static constexpr const char* words = "Rayleigh number on the heat flux";
+  static constexpr const char* key = "RaStar";
+  static constexpr const char* on_length = L::words;
+};
 /// Rayleigh number on the gap times gap over height: Ra_b b/H
 struct elenbaas : pure_number {
   static constexpr const char* symbol = "El";
@@ -134,6 +142,27 @@ struct length_ratio : pure_number {
   static constexpr const char* words = "length over diameter";
   static constexpr const char* key = "L_over_D";
 };
+/// tau_w / (rho u^2/2) at one station of a wall in a free stream
+struct local_skin_friction : pure_number {
+  static constexpr const char* symbol = "cf_x";
+  static constexpr const char* words = "local skin-friction coefficient";
+};
+/// Drag of one side / (A rho u^2/2)
+struct skin_friction : pure_number {
+  static constexpr const char* symbol = "Cf";
+  static constexpr const char* words = "mean skin-friction coefficient";
+};
+/// Gap between two cylinders over their mean radius
+struct gap_ratio : pure_number {
+  static constexpr const char* symbol = "b/r_m";
+  static constexpr const char* words = "gap over mean radius";
+  static constexpr const char* key = "b_over_rm";
+};
+/// What the squared Taylor number is divided by in a gap that is not narrow
+struct gap_geometry_factor : pure_number {
+  static constexpr const char* symbol = "F_g";
+  static constexpr const char* words = "geometry factor of the squared Taylor number";
+};
 /// Radius of the inner over the outer cylinder
 struct radius_ratio : pure_number {
   static constexpr const char* symbol = "eta";
@@ -163,6 +192,47 @@ struct temperature_ratio : pure_number {
   static constexpr const char* words = "absolute bulk over wall temperature";
   static constexpr const char* key = "Tb_over_Tw";
 };
+/// (T_2 - T_inlet)/(T_1 - T_inlet) of the two walls of a channel
+struct wall_excess_ratio : pure_number {
+  static constexpr const char* symbol = "r_T";
+  static constexpr const char* words = "excess of wall 2 over that of wall 1";
+  static constexpr const char* key = "rT";
+};
+/// Gap between the walls over the height of the channel
+struct gap_over_height : pure_number {
+  static constexpr const char* symbol = "b/H";
+  static constexpr const char* words = "gap over height";
+};
+/// n in (a^n + b^n)^(1/n)
+struct blending_exponent : pure_number {
+  static constexpr const char* symbol = "n";
+  static constexpr const char* words = "exponent of the blend";
+};
+/// Mean Nusselt number of a duct with its entrance over the developed one
+struct entrance_factor : pure_number {
+  static constexpr const char* symbol = "Nu_m/Nu";
+  static constexpr const char* words = "mean over developed Nusselt number";
+};
+/// Nusselt number at one station behind the entrance over the developed one
+struct local_entrance_factor : pure_number {
+  static constexpr const char* symbol = "Nu_x/Nu";
+  static constexpr const char* words = "local over developed Nusselt number";
+};
+/// Length in which the velocity profile develops, over the hydraulic diameter
+struct velocity_entry_ratio : pure_number {
+  static constexpr const char* symbol = "L_h/D";
+  static constexpr const char* words = "hydrodynamic entrance length over diameter";
+};
+/// Length in which the temperature profile develops, over the hydraulic diameter
+struct thermal_entry_ratio : pure_number {
+  static constexpr const char* symbol = "L_t/D";
+  static constexpr const char* words = "thermal entrance length over diameter";
+};
+/// Friction factor with the fluid's real viscosity over that at the bulk viscosity
+struct friction_correction : pure_number {
+  static constexpr const char* symbol = "f/f_b";
+  static constexpr const char* words = "friction factor over that at bulk viscosity";
+};
 /// Reynolds number at which a boundary layer turns turbulent
 struct transition_reynolds : pure_number {
   static constexpr const char* symbol = "Re_c";
@@ -181,11 +251,23 @@ inline constexpr gate<kinds::squared_taylor> squared_taylor_number{};
 inline constexpr gate<kinds::darcy_friction> darcy_friction{};
 inline constexpr gate<kinds::fanning_friction> fanning_friction{};
 inline constexpr gate<kinds::length_ratio> length_ratio{};
+inline constexpr gate<kinds::local_skin_friction> local_skin_friction{};
+inline constexpr gate<kinds::skin_friction> skin_friction{};
+inline constexpr gate<kinds::gap_ratio> gap_ratio{};
+inline constexpr gate<kinds::gap_geometry_factor> gap_geometry_factor{};
 inline constexpr gate<kinds::radius_ratio> radius_ratio{};
 inline constexpr gate<kinds::relative_roughness> relative_roughness{};
 inline constexpr gate<kinds::viscosity_ratio> viscosity_ratio{};
 inline constexpr gate<kinds::prandtl_ratio> prandtl_ratio{};
 inline constexpr gate<kinds::temperature_ratio> temperature_ratio{};
+inline constexpr gate<kinds::wall_excess_ratio> wall_excess_ratio{};
+inline constexpr gate<kinds::gap_over_height> gap_over_height{};
+inline constexpr gate<kinds::blending_exponent> blending_exponent{};
+inline constexpr gate<kinds::entrance_factor> entrance_factor{};
+inline constexpr gate<kinds::local_entrance_factor> local_entrance_factor{};
+inline constexpr gate<kinds::velocity_entry_ratio> velocity_entry_ratio{};
+inline constexpr gate<kinds::thermal_entry_ratio> thermal_entry_ratio{};
+inline constexpr gate<kinds::friction_correction> friction_correction{};
 inline constexpr gate<kinds::transition_reynolds> transition_reynolds{};
 
 namespace detail {
@@ -207,6 +289,8 @@ template <auto L>
 inline constexpr gate<kinds::grashof<kind_of<L>>> grashof_of{};
 template <auto L>
 inline constexpr gate<kinds::rayleigh<kind_of<L>>> rayleigh_of{};
+template <auto L>
+inline constexpr gate<kinds::flux_rayleigh<kind_of<L>>> flux_rayleigh_of{};
 template <auto L>
 inline constexpr gate<kinds::richardson<kind_of<L>>> richardson_of{};
 template <auto L>

@@ -24,6 +24,14 @@ template <class K>
 constexpr bool is_number = std::is_same_v<typename K::unit_type, boost::units::si::dimensionless>;
 }  // namespace detail
 
+/// Anything with a kind: a typed number or an estimate.
+template <class A>
+concept has_kind = requires(const A& a) {
+  typename A::kind_type;
+  typename A::value_type;
+  a.si();
+};
+
 template <class K>
 struct gate;
 
@@ -72,6 +80,18 @@ class typed {
     return a.value_ > b.value_;
   }
 
+  // Two kinds don't mix, and absolute temperatures have a difference but no sum. Deleted rather
+  // than absent: the compiler's complaint is then short and names both kinds.
+  template <has_kind B>
+  friend void operator+(const typed& a, const B& b) = delete;
+  template <has_kind B>
+    requires(!detail::is_point<K> || !detail::is_point<typename B::kind_type>)
+  friend void operator-(const typed& a, const B& b) = delete;
+  template <has_kind B>
+  friend void operator<(const typed& a, const B& b) = delete;
+  template <has_kind B>
+  friend void operator>(const typed& a, const B& b) = delete;
+
  private:
   T value_;
 };
@@ -88,6 +108,8 @@ struct gate {
     static_assert(!std::is_integral_v<T>, "write the number with a point: 5.0, not 5");
     return typed<K, T>::from_si(q.value());
   }
+  template <class X>
+  void operator()(const X&) const = delete;  // not a quantity in the kind's SI unit
 };
 
 template <class K>
@@ -99,23 +121,25 @@ struct gate<K> {
   CONVELOPE_FUNCTION constexpr typed<K, T> operator()(const T& number) const {
     return typed<K, T>::from_si(number);
   }
+  template <class X>
+  void operator()(const X&) const = delete;  // not a number; an integer: write 5.0, not 5
 };
 
 /// The kind behind a gate object: kind_of<diameter> is kinds::diameter.
 template <auto Gate>
 using kind_of = typename std::remove_cvref_t<decltype(Gate)>::kind_type;
 
-/// Anything with a kind: a typed number or an estimate.
-template <class A>
-concept has_kind = requires(const A& a) {
-  typename A::kind_type;
-  typename A::value_type;
-  a.si();
-};
+namespace detail {
+// Plain constants, because a compiler recites every line of a concept that does not hold.
+template <class A, class K>
+constexpr bool is_of_kind = false;
+template <has_kind A, class K>
+constexpr bool is_of_kind<A, K> = std::is_same_v<typename A::kind_type, K>;
+}  // namespace detail
 
 /// The argument measures exactly this kind.
 template <class A, class K>
-concept measures = has_kind<A> && std::is_same_v<typename A::kind_type, K>;
+concept measures = detail::is_of_kind<A, K>;
 
 }  // namespace v0
 }  // namespace convelope

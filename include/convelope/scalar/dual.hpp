@@ -6,14 +6,14 @@
 namespace convelope {
 inline namespace v0 {
 
-template <class T, int N = 1>
+template <class T, int Size = 1>
 class dual;
 
 namespace detail {
 template <class S>
 constexpr bool is_dual = false;
-template <class T, int N>
-constexpr bool is_dual<dual<T, N>> = true;
+template <class T, int Size>
+constexpr bool is_dual<dual<T, Size>> = true;
 
 // A number that has no derivative where a dual<T, N> is expected.
 template <class S, class T>
@@ -36,14 +36,14 @@ CONVELOPE_FUNCTION constexpr decltype(auto) as(const S& s) {
 /// A value and N first derivatives, carried forward (forward-mode differentiation).
 /// Nestable: dual<dual<double>> gives second derivatives. Comparisons look at the value.
 /// dual<T, 0> carries none; float formulas run on it so that literals stay single precision.
-template <class T, int N>
+template <class T, int Size>
 class dual {
  public:
   using value_type = T;
-  static constexpr int size = N;
+  static constexpr int size = Size;
 
   T value;
-  T slope[N == 0 ? 1 : N];
+  T slope[static_cast<std::size_t>(Size == 0 ? 1 : Size)];
 
   dual() = default;
   CONVELOPE_FUNCTION constexpr dual(const T& v) : value(v), slope{} {  // NOLINT: literals convert
@@ -56,7 +56,7 @@ class dual {
   /// The variable itself: derivative 1 in direction k, 0 in the others.
   CONVELOPE_FUNCTION static constexpr dual variable(const T& v, int k = 0) {
     dual x(v);
-    if constexpr (N > 0) x.slope[k] = scalar_adaptor<T>::constant(1.0);
+    if constexpr (Size > 0) x.slope[k] = scalar_adaptor<T>::constant(1.0);
     return x;
   }
 
@@ -142,7 +142,7 @@ class dual {
   template <class Rule>
   CONVELOPE_FUNCTION constexpr dual chain(const T& v, Rule rule) const {
     dual r(v);
-    for (int i = 0; i < N; ++i) r.slope[i] = rule(slope[i]);
+    for (int i = 0; i < Size; ++i) r.slope[i] = rule(slope[i]);
     return r;
   }
 
@@ -154,14 +154,14 @@ class dual {
   CONVELOPE_FUNCTION static constexpr dual map(const dual& a, const dual& b, const T& v,
                                                Rule rule) {
     dual r(v);
-    for (int i = 0; i < N; ++i) r.slope[i] = rule(a.slope[i], b.slope[i]);
+    for (int i = 0; i < Size; ++i) r.slope[i] = rule(a.slope[i], b.slope[i]);
     return r;
   }
 };
 
-template <class T, int N>
-struct scalar_adaptor<dual<T, N>> {
-  using D = dual<T, N>;
+template <class T, int Size>
+struct scalar_adaptor<dual<T, Size>> {
+  using D = dual<T, Size>;
   using plain = plain_t<T>;
   using working = D;
   using bits = bits_t<T>;
@@ -191,7 +191,7 @@ struct scalar_adaptor<dual<T, N>> {
     return D(scalar_adaptor<T>::constant(c));
   }
   template <int P, int Q>
-    requires(N > 0)
+    requires(Size > 0)
   CONVELOPE_FUNCTION static D power(const D& x) {
     const T v = math::power<P, Q>(x.value);
     if constexpr (Q == 1 && P >= 1) {  // no division: right at x = 0 too
@@ -206,7 +206,7 @@ struct scalar_adaptor<dual<T, N>> {
   template <class Mask>
   CONVELOPE_FUNCTION static constexpr D select(const Mask& m, const D& yes, const D& no) {
     D r(scalar_adaptor<T>::select(m, yes.value, no.value));
-    for (int i = 0; i < N; ++i) {
+    for (int i = 0; i < Size; ++i) {
       r.slope[i] = scalar_adaptor<T>::select(m, yes.slope[i], no.slope[i]);
     }
     return r;
@@ -222,7 +222,7 @@ struct scalar_adaptor<dual<T, N>> {
  private:
   template <class Slope>
   CONVELOPE_FUNCTION static constexpr D scaled(const D& x, const T& v, Slope slope_at) {
-    if constexpr (N == 0) {
+    if constexpr (Size == 0) {
       return D(v);
     } else {
       const T k = slope_at();

@@ -15,16 +15,16 @@ constexpr int factor_count(int q, int f) { return q % f == 0 ? 1 + factor_count(
 constexpr int power_of(int base, int n) { return n == 0 ? 1 : base * power_of(base, n - 1); }
 
 /// x^n by squaring.
-template <int N, class T>
+template <int Exponent, class T>
 CONVELOPE_FUNCTION constexpr T whole_power(const T& x) {
-  static_assert(N >= 1);
-  if constexpr (N == 1) {
+  static_assert(Exponent >= 1);
+  if constexpr (Exponent == 1) {
     return x;
-  } else if constexpr (N % 2 == 0) {
-    const T half = whole_power<N / 2>(x);
+  } else if constexpr (Exponent % 2 == 0) {
+    const T half = whole_power<Exponent / 2>(x);
     return T(half * half);
   } else {
-    return T(whole_power<N - 1>(x) * x);
+    return T(whole_power<Exponent - 1>(x) * x);
   }
 }
 

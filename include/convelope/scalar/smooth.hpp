@@ -35,9 +35,9 @@ CONVELOPE_FUNCTION constexpr T weighted(const T& a, const T& b, const T& w) {
 
 /// (a^n + b^n)^(1/n), both >= 0: the joining rule of Churchill and Usagi 1972,
 /// AIChE J. 18, 1121-1128.
-template <int N, class T>
+template <int Exponent, class T>
 CONVELOPE_FUNCTION constexpr T joined(const T& a, const T& b) {
-  return power<1, N>(T(power<N>(a) + power<N>(b)));
+  return power<1, Exponent>(T(power<Exponent>(a) + power<Exponent>(b)));
 }
 
 }  // namespace math

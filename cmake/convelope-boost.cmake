@@ -1,0 +1,25 @@
+# convelope_find_boost(<result>): the target that carries the Boost headers, or FALSE.
+# A target that the including project already has is taken as it is. Used by the build tree and
+# by the installed package.
+macro(convelope_find_boost result)
+  if(NOT (TARGET Boost::units OR TARGET Boost::headers OR TARGET Boost::boost))
+    find_package(Boost 1.74 QUIET CONFIG)
+    if(NOT Boost_FOUND)
+      if(POLICY CMP0167)
+        cmake_policy(PUSH)
+        cmake_policy(SET CMP0167 OLD) # a header tree without a package file needs the find module
+      endif()
+      find_package(Boost 1.74 QUIET MODULE)
+      if(POLICY CMP0167)
+        cmake_policy(POP)
+      endif()
+    endif()
+  endif()
+  set(${result} FALSE)
+  foreach(convelope_candidate IN ITEMS Boost::units Boost::headers Boost::boost)
+    if(NOT ${result} AND TARGET ${convelope_candidate})
+      set(${result} ${convelope_candidate})
+    endif()
+  endforeach()
+  unset(convelope_candidate)
+endmacro()

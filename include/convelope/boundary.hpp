@@ -1,0 +1,6 @@
+#ifndef CONVELOPE_BOUNDARY_HPP
+#define CONVELOPE_BOUNDARY_HPP
+
+#include "convelope/boundary/surface.hpp"
+
+#endif

@@ -1,0 +1,18 @@
+#ifndef CONVELOPE_CONVELOPE_HPP
+#define CONVELOPE_CONVELOPE_HPP
+
+#include "convelope/boundary.hpp"
+#include "convelope/catalogue.hpp"
+#include "convelope/correlations.hpp"
+#include "convelope/estimate.hpp"
+#include "convelope/faces.hpp"
+#include "convelope/fluids.hpp"
+#include "convelope/groups.hpp"
+#include "convelope/kinds.hpp"
+#include "convelope/scalar.hpp"
+#include "convelope/scales.hpp"
+#include "convelope/surfaces.hpp"
+#include "convelope/units.hpp"
+#include "convelope/version.hpp"
+
+#endif

@@ -1,0 +1,109 @@
+#ifndef CONVELOPE_SURFACES_VERTICAL_PLATE_HPP
+#define CONVELOPE_SURFACES_VERTICAL_PLATE_HPP
+
+#include "convelope/correlations/natural/vertical_plate.hpp"
+#include "convelope/surfaces/flat_plate.hpp"
+
+namespace convelope {
+inline namespace v0 {
+
+/// Which way a stream passes a vertical wall. A negative velocity turns it round.
+enum class stream_direction : unsigned char { upward, downward, horizontal };
+
+/// A vertical isothermal wall in a fluid at rest or in a stream along it.
+///
+/// Natural: vertical-plate/churchill-chu-laminar-1975, handed over to churchill-chu-1975 between
+/// Ra 1e9 and 1e10. Forced: the boundary layer of plate_along_stream on the height.
+/// Joined by Nu^6 = F^6 + N^6 + 2 s F^3 N^3. s = 1 (buoyancy assists the stream) is the exponent-3
+/// rule of Churchill 1977, AIChE J. 23, 10-16; s = -7/8 stands for an opposing stream, where the
+/// rule's difference F^3 - N^3 would pass through zero: the least value, 0.79 of either, is at
+/// F = N (a choice of this library, on the safe side of common practice); s = sqrt(2) - 1 for a
+/// horizontal stream equals the exponent-4 rule at F = N. s passes smoothly through the change of
+/// side at T_wall = T_stream.
+struct vertical_wall {
+  typed<kinds::height> height;
+  stream_direction direction = stream_direction::upward;
+  typed<kinds::transition_reynolds> transition = typed<kinds::transition_reynolds>::from_si(5e5);
+  typed<kinds::gravity> gravity = standard_gravity;
+
+  using natural_laminar = vertical_plate::churchill_chu_laminar_1975;
+  using natural_all = vertical_plate::churchill_chu_1975;
+  using forced = flat_plate::churchill_ozoe_1973_isothermal_average;
+  static constexpr const char* name = "vertical wall";
+  static constexpr const speakers& speaks =
+      detail::speakers_of<natural_laminar, natural_all, forced>;
+  template <class T>
+  using exposure = stream<T>;
+
+  template <fluid Fluid, class T>
+  CONVELOPE_FUNCTION constexpr film<T> film_at(const Fluid& f, const still<T>& s,
+                                               const T& wall) const {
+    const auto calm = typed<kinds::free_stream_velocity, T>::from_si(
+        scalar_adaptor<T>::constant(0.0));
+    const auto far =
+        typed<kinds::free_stream_temperature, T>::from_si(s.temperature.si());
+    return film_at(f, stream<T>{calm, far, s.pressure}, wall);
+  }
+
+  template <fluid Fluid, class T>
+  CONVELOPE_FUNCTION constexpr film<T> film_at(const Fluid& f, const stream<T>& s,
+                                               const T& wall) const {
+    using P = plain_t<T>;
+    const detail::usable_length h(height.si());
+    const T& ambient = s.temperature.si();
+    const T& p = s.pressure.si();
+    const T at = T(0.5 * (wall + ambient));
+    const fluid_values<T> v = f.values(at, p);
+    const T Pr = v.prandtl();
+    const T& u = s.velocity.si();
+
+    const T Ra_signed =
+        detail::signed_rayleigh(v, detail::expansion_by_rule(f, v, ambient, p), T(wall - ambient),
+                                h.metres, gravity.si());
+    const T Ra = math::smooth_magnitude(Ra_signed, detail::least_rayleigh);
+    // Handed over in Ra^(1/6), which the formulas share: 31.6 is 1e9, 46.4 is 1e10.
+    const T w = math::hand_over(math::power<1, 6>(Ra), 31.622776601683793, 46.415888336127789);
+    const T natural_Nu = math::weighted(natural_laminar::formula(Ra, Pr), natural_all::formula(Ra, Pr), w);
+
+    const T Re_signed = T(h.metres * v.density * u / v.viscosity);
+    const T Re = math::smooth_magnitude(Re_signed, detail::least_reynolds);
+    const detail::plate_layer<T> layer(Re, Pr, transition.si());
+
+    const T F3 = math::power<3>(layer.Nu);
+    const T N3 = math::power<3>(natural_Nu);
+    const T Nu6 = T(F3 * F3 + N3 * N3 + 2.0 * assistance(Ra_signed, Re_signed) * F3 * N3);
+
+    const P f6 = P(plain(F3) * plain(F3));
+    const P n6 = P(plain(N3) * plain(N3));
+    const P forced_share = P(f6 / (f6 + n6));
+    const P turbulent = P(plain(w) * detail::complement(forced_share));
+    const P laminar = P(detail::complement(plain(w)) * detail::complement(forced_share));
+    const bits_t<T> bits(bits_t<T>(h.bits) | f.check(at, p) |
+                         detail::finite<T>(wall, ambient, p, u) |
+                         detail::asked<natural_laminar, T>(0, laminar, Ra, Pr) |
+                         detail::asked<natural_all, T>(1, turbulent, Ra, Pr) |
+                         detail::asked<forced, T>(2, forced_share, Re, Pr));
+    return detail::film_of(math::power<1, 6>(Nu6), v.conductivity, h.metres, ambient, bits,
+                           P(laminar * detail::variance_of<natural_laminar, T>() +
+                             turbulent * detail::variance_of<natural_all, T>() +
+                             forced_share * detail::variance_of<forced, T>()),
+                           laminar, turbulent, forced_share);
+  }
+
+ private:
+  template <class T>
+  CONVELOPE_FUNCTION constexpr T assistance(const T& Ra_signed, const T& Re_signed) const {
+    if (direction == stream_direction::horizontal) {
+      return scalar_adaptor<T>::constant(0.41421356237309503);
+    }
+    const double up = direction == stream_direction::upward ? 1.0 : -1.0;
+    const T s = T(up * math::smooth_sign(Ra_signed, detail::side_rayleigh) *
+                  math::smooth_sign(Re_signed, 1.0));
+    return T(s * (15.0 + s) * (1.0 / 16.0));
+  }
+};
+
+}  // namespace v0
+}  // namespace convelope
+
+#endif

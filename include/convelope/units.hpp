@@ -1,0 +1,6 @@
+#ifndef CONVELOPE_UNITS_HPP
+#define CONVELOPE_UNITS_HPP
+
+#include "convelope/units/units.hpp"
+
+#endif

@@ -1,0 +1,33 @@
+cmake_minimum_required(VERSION 3.22)
+file(REMOVE_RECURSE ${PREFIX} ${PREFIX}-first)
+execute_process(COMMAND ${CMAKE_COMMAND} --install ${BUILD} --prefix ${PREFIX}-first
+                RESULT_VARIABLE result OUTPUT_VARIABLE output ERROR_VARIABLE output)
+if(NOT result EQUAL 0)
+  message(FATAL_ERROR "${output}")
+endif()
+file(RENAME ${PREFIX}-first ${PREFIX})
+
+# Headers, the package files, the .pc file and the licence: no program and no test of ours.
+file(GLOB_RECURSE files RELATIVE ${PREFIX} ${PREFIX}/*)
+set(strangers ${files})
+list(FILTER strangers EXCLUDE
+     REGEX "^(include/convelope/.*\\.hpp|share/(cmake|licenses)/convelope/.*|share/pkgconfig/convelope\\.pc)$")
+if(strangers)
+  message(FATAL_ERROR "installed without need: ${strangers}")
+endif()
+foreach(wanted IN ITEMS include/convelope/convelope.hpp share/pkgconfig/convelope.pc
+                        share/cmake/convelope/convelope-config.cmake)
+  if(NOT wanted IN_LIST files)
+    message(FATAL_ERROR "not installed: ${wanted}")
+  endif()
+endforeach()
+file(GLOB_RECURSE texts ${PREFIX}/share/*)
+foreach(text IN LISTS texts)
+  file(READ ${text} content)
+  foreach(place IN ITEMS ${PREFIX} ${BUILD})
+    string(FIND "${content}" "${place}" where)
+    if(NOT where EQUAL -1)
+      message(FATAL_ERROR "${text} names ${place}")
+    endif()
+  endforeach()
+endforeach()

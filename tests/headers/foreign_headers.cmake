@@ -1,0 +1,18 @@
+# Writes OUTPUT: an include line for each header of others that ours use, where it is installed.
+cmake_minimum_required(VERSION 3.22)
+include(${CMAKE_CURRENT_LIST_DIR}/includes.cmake)
+
+file(GLOB_RECURSE headers ${INCLUDE_DIR}/*.hpp)
+set(foreign "")
+foreach(header IN LISTS headers)
+  includes_of(${header} names)
+  list(FILTER names EXCLUDE REGEX "^convelope/")
+  list(APPEND foreign ${names})
+endforeach()
+list(REMOVE_DUPLICATES foreign)
+list(SORT foreign)
+set(text "")
+foreach(name IN LISTS foreign)
+  string(APPEND text "#if __has_include(<${name}>)\n#include <${name}>\n#endif\n")
+endforeach()
+file(WRITE ${OUTPUT} "${text}")

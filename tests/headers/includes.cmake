@@ -1,0 +1,10 @@
+# includes_of(<file> <result>): the names in the #include lines of a file.
+function(includes_of file result)
+  file(STRINGS ${file} lines REGEX "^[ \t]*#[ \t]*include[ \t]*[<\"]")
+  set(names "")
+  foreach(line IN LISTS lines)
+    string(REGEX REPLACE "^[^<\"]*[<\"]([^>\"]+)[>\"].*$" "\\1" name "${line}")
+    list(APPEND names "${name}")
+  endforeach()
+  set(${result} "${names}" PARENT_SCOPE)
+endfunction()

@@ -1,0 +1,9 @@
+// names: wall, film
+struct wall {};
+struct film {};
+void at(film);
+#ifdef TWIN
+void f() { at(film{}); }
+#else
+void f() { at(wall{}); }
+#endif

@@ -1,0 +1,3 @@
+if(COMPLAINTS)
+  message(FATAL_ERROR "README.md:${COMPLAINTS}")
+endif()
