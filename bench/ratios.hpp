@@ -22,6 +22,7 @@ struct ratio {
 /// Keeps the median of each benchmark while the console shows all.
 class median_keeper : public benchmark::ConsoleReporter {
  public:
+  median_keeper() : ConsoleReporter(OO_Tabular) {}
   void ReportRuns(const std::vector<Run>& runs) override {
     for (const Run& r : runs) {
       if (r.aggregate_name == "median") medians_[r.run_name.function_name] = r.GetAdjustedCPUTime();

@@ -6,6 +6,7 @@
 //   expect_inside<C>(inputs...)              no limit crossed
 //   expect_crossed<C>(i, side, inputs...)    limit i crossed on that side, and nothing else
 //   expect_also_crossed<C>(i, side, ...)     the same where other limits are crossed too
+//   expect_record<C>(id, quantity, ...)      what it says of itself
 //   expect_not_finite<C>(inputs...)          NaN or infinity in any input is told
 // Inputs are doubles in the order of C's gates, enumerators for choices.
 
@@ -36,11 +37,19 @@ using convelope::dual;
 using convelope::side;
 using pack = std::experimental::native_simd<double>;
 
-/// Just inside and just outside a limit at x.
+/// The decimal number itself: 0.62_exact is not the double nearest to it.
+inline exact operator""_exact(const char* digits) { return exact(digits); }
+/// x^(p/q), the plain way.
+inline exact raised(const exact& x, int p, int q = 1) { return exact(pow(x, exact(p) / q)); }
+
+/// Just under and just over a limit at x.
 constexpr double below(double x) { return x < 0.0 ? x * (1.0 + 1e-9) : x * (1.0 - 1e-9); }
 constexpr double above(double x) { return x < 0.0 ? x * (1.0 - 1e-9) : x * (1.0 + 1e-9); }
 
 namespace detail {
+
+// doctest prints a plain const char* as an address
+inline doctest::String text(const char* s) { return doctest::String(s); }
 
 /// |got - want| <= tolerance. Finiteness is read from the bits: NaN compares as anything under
 /// -ffast-math.
@@ -50,8 +59,8 @@ void close(const char* id, const char* what, const T& got, const exact& want, do
   const double wanted = static_cast<double>(want);
   const bool finite = convelope::scalar_adaptor<double>::bits_where_not_finite(as_double, 1) == 0 &&
                       convelope::scalar_adaptor<double>::bits_where_not_finite(wanted, 1) == 0;
-  CAPTURE(id);
-  CAPTURE(what);
+  INFO(text(id));
+  INFO(text(what));
   CAPTURE(as_double);
   CAPTURE(wanted);
   REQUIRE(finite);
@@ -226,10 +235,21 @@ void check_scalars(const X&... x) {
   }
 }
 
+/// What the correlation says of itself, word for word.
+template <class C>
+void expect_record(const char* id, const char* quantity, double scatter,
+                   convelope::state_rule state_at) {
+  INFO(detail::text(id));
+  CHECK(convelope::detail::same_text(C::id, id));
+  CHECK(convelope::detail::same_text(C::quantity, quantity));
+  CHECK(C::scatter == scatter);
+  CHECK(C::state_at == state_at);
+}
+
 /// Nothing is said against the answer for these inputs.
 template <class C, class... X>
 void expect_inside(const X&... x) {
-  CAPTURE(C::id);
+  INFO(detail::text(C::id));
   const auto answer = detail::typed_call<C>(x...);
   CHECK(answer.inside());
   CHECK((answer.verdict().bits() & detail::outside_mask) == 0);
@@ -238,7 +258,7 @@ void expect_inside(const X&... x) {
 /// Limit number `limit` is crossed on side s, whatever else is.
 template <class C, class... X>
 void expect_also_crossed(int limit, side s, const X&... x) {
-  CAPTURE(C::id);
+  INFO(detail::text(C::id));
   CAPTURE(limit);
   const auto verdict = detail::typed_call<C>(x...).verdict();
   CHECK_FALSE(verdict.inside());
@@ -251,7 +271,7 @@ void expect_also_crossed(int limit, side s, const X&... x) {
 template <class C, class... X>
 void expect_crossed(int limit, side s, const X&... x) {
   expect_also_crossed<C>(limit, s, x...);
-  CAPTURE(C::id);
+  INFO(detail::text(C::id));
   CAPTURE(limit);
   const auto bits = detail::typed_call<C>(x...).verdict().bits();
   CHECK((bits & detail::outside_mask) == convelope::detail::word::of_correlation(0, limit, s));
@@ -261,7 +281,7 @@ void expect_crossed(int limit, side s, const X&... x) {
 template <class C, class... X>
 void expect_not_finite(const X&... x) {
   expect_inside<C>(x...);
-  CAPTURE(C::id);
+  INFO(detail::text(C::id));
   const double infinity = std::numeric_limits<double>::infinity();
   const double bad[] = {std::numeric_limits<double>::quiet_NaN(), infinity, -infinity};
   std::size_t at = 0;

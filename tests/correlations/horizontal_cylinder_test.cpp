@@ -121,14 +121,24 @@ TEST_SUITE("correlations: horizontal cylinder") {
           doctest::Approx(0.6703 * shape).epsilon(1e-3));
   }
 
-  TEST_CASE("formulas side by side") {
-    // 15 %: common practice between correlations of one body
-    for (const double Ra : {1e-2, 1.0, 1e3, 1e5, 1e7, 1e9}) {
+  TEST_CASE("formulas side by side, air") {
+    // 15 % to 25 %: common practice between correlations of one body
+    for (const double Ra : {1e-2, 1.0, 1e3, 1e5, 1e7}) {
       CAPTURE(Ra);
-      const double of_all = tube::raithby_hollands_1998::formula(Ra, 0.71);
-      CHECK(tube::morgan_1975::formula(Ra) == doctest::Approx(of_all).epsilon(0.15));
-      CHECK(tube::churchill_chu_1975::formula(Ra, 0.71) == doctest::Approx(of_all).epsilon(0.25));
+      const double joined = tube::raithby_hollands_1998::formula(Ra, 0.71);
+      CHECK(tube::morgan_1975::formula(Ra) == doctest::Approx(joined).epsilon(0.15));
+      CHECK(tube::churchill_chu_1975::formula(Ra, 0.71) == doctest::Approx(joined).epsilon(0.25));
     }
+    // turbulent: 0.103 and 0.125 Ra^(1/3) are that far apart
+    CHECK(tube::morgan_1975::formula(1e11) / tube::raithby_hollands_1998::formula(1e11, 0.71) ==
+          doctest::Approx(0.125 / 0.103).epsilon(0.01));
+    // what the laminar form's comment says of it
+    const auto laminar = [](double Ra) {
+      return tube::churchill_chu_laminar_1975::formula(Ra, 0.71) /
+             tube::raithby_hollands_1998::formula(Ra, 0.71);
+    };
+    CHECK(laminar(1.0) == doctest::Approx(0.74).epsilon(0.01));
+    CHECK(laminar(1e-6) == doctest::Approx(1.20).epsilon(0.01));
   }
 
   TEST_CASE("envelopes") {

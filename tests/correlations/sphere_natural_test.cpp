@@ -71,6 +71,9 @@ TEST_SUITE("correlations: sphere, natural") {
     CHECK(excess(1e8) == doctest::Approx(0.106).epsilon(0.01));
     CHECK(excess(1e9) == doctest::Approx(0.31).epsilon(0.02));
     CHECK(excess(1e11) == doctest::Approx(0.92).epsilon(0.01));
+    // far into turbulence Raithby and Hollands 1998 have 0.104 Ra^(1/3) in air (from memory)
+    CHECK(sphere::churchill_1983::formula(1e11, 0.71) ==
+          doctest::Approx(0.104 * std::cbrt(1e11)).epsilon(0.03));
     // air: Yuge's own 2 + 0.392 Gr^(1/4) (from memory)
     CHECK(sphere::yuge_1960::formula(1e4) ==
           doctest::Approx(2.0 + 0.392 * std::pow(1e4 / 0.71, 0.25)).epsilon(0.01));

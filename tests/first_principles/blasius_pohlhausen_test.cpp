@@ -1,14 +1,36 @@
-// Flat plate, laminar: the solver against published numbers and closed limits.
+// Flat plate, laminar: the solver against published numbers and closed limits, then the library's
+// correlations against the solver.
 
 #include "blasius_pohlhausen.hpp"
 
 #include <boost/math/special_functions/beta.hpp>
 #include <cmath>
 #include <doctest/doctest.h>
+#include <initializer_list>
 #include <numbers>
 
+#include "convelope/correlations/external/flat_plate_laminar.hpp"
+#include "deviation.hpp"
+
+namespace plate = convelope::flat_plate;
+using first_principles::check_band;
+using first_principles::deviations;
+using first_principles::plate_layer;
 using first_principles::blasius_wall_shear;
 using first_principles::solve_plate_layer;
+
+namespace {
+
+// deviation of a correlation at Re = 1 from `factor` times a result of the solver, per cent
+template <class Correlation>
+first_principles::interval band(double plate_layer::*exact, double factor,
+                                std::initializer_list<double> prandtl) {
+  return deviations(prandtl, [=](double Pr) {
+    return Correlation::formula(1.0, Pr) / (factor * solve_plate_layer(Pr).*exact);
+  });
+}
+
+}  // namespace
 
 TEST_SUITE("first principles: flat plate") {
   TEST_CASE("wall shear and displacement of the Blasius layer") {
@@ -65,9 +87,9 @@ TEST_SUITE("first principles: flat plate") {
       const double b = solve_plate_layer(4e-4).*member / 2e-2;
       return 2.0 * a - b;
     };
-    CHECK(limit(&first_principles::plate_layer::isothermal) ==
+    CHECK(limit(&plate_layer::isothermal) ==
           doctest::Approx(std::numbers::inv_sqrtpi).epsilon(5e-4));
-    CHECK(limit(&first_principles::plate_layer::isoflux) ==
+    CHECK(limit(&plate_layer::isoflux) ==
           doctest::Approx(1.0 / (2.0 * std::numbers::inv_sqrtpi)).epsilon(5e-4));
   }
 
@@ -79,5 +101,46 @@ TEST_SUITE("first principles: flat plate") {
       CHECK(loose.isothermal == doctest::Approx(tight.isothermal).epsilon(1e-8));
       CHECK(loose.isoflux == doctest::Approx(tight.isoflux).epsilon(1e-8));
     }
+  }
+
+  TEST_CASE("library: every Prandtl number") {
+    const auto all = {1e-3, 3e-3, 0.01, 0.03, 0.1, 0.3, 0.7, 1.0, 10.0, 100.0, 1000.0};
+    using local_temperature = plate::churchill_ozoe_1973_isothermal_local;
+    check_band(band<local_temperature>(&plate_layer::isothermal, 1.0, all), {-1.12, -1.06},
+               {1.35, 1.41});
+    // h falls as x^(-1/2): the mean is twice the local value
+    using mean_temperature = plate::churchill_ozoe_1973_isothermal_average;
+    check_band(band<mean_temperature>(&plate_layer::isothermal, 2.0, all), {-1.12, -1.06},
+               {1.35, 1.41});
+    using local_flux = plate::churchill_ozoe_1973_isoflux_local;
+    check_band(band<local_flux>(&plate_layer::isoflux, 1.0, all), {-0.89, -0.83}, {1.60, 1.66});
+    // the constant of high Pr alone
+    check_band(band<local_temperature>(&plate_layer::isothermal, 1.0, {1000.0}), {-0.07, 0.0},
+               {-0.07, 0.0});
+    check_band(band<local_flux>(&plate_layer::isoflux, 1.0, {1000.0}), {-0.05, 0.02},
+               {-0.05, 0.02});
+  }
+
+  TEST_CASE("library: ordinary fluids") {
+    const auto ordinary = {0.6, 0.7, 1.0, 3.0, 10.0, 60.0};
+    using local_temperature = plate::laminar_isothermal_local;
+    check_band(band<local_temperature>(&plate_layer::isothermal, 1.0, ordinary), {-1.97, -1.92},
+               {1.08, 1.13});
+    using mean_temperature = plate::laminar_isothermal_average;
+    check_band(band<mean_temperature>(&plate_layer::isothermal, 2.0, ordinary), {-1.97, -1.92},
+               {1.08, 1.13});
+    using local_flux = plate::laminar_isoflux_local;
+    check_band(band<local_flux>(&plate_layer::isoflux, 1.0, ordinary), {-2.31, -2.26},
+               {-0.72, -0.66});
+    // q L/k over the mean excess: the excess grows as x^(1/2), its mean is 2/3 of the last
+    using mean_flux = plate::laminar_isoflux_average;
+    check_band(band<mean_flux>(&plate_layer::isoflux, 1.5, ordinary), {-2.24, -2.19},
+               {-0.65, -0.59});
+  }
+
+  TEST_CASE("library: liquid metals") {
+    using slug = plate::laminar_low_prandtl_local;
+    check_band(band<slug>(&plate_layer::isothermal, 1.0, {1e-3, 0.01, 0.05}), {3.0, 3.07},
+               {20.0, 20.06});
   }
 }

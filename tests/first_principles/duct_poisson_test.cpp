@@ -1,5 +1,5 @@
 // Developed flow and heat transfer in ducts: the two solvers against published numbers and each
-// other's limits, with the order of convergence.
+// other's limits, with the order of convergence, then the library against the solvers.
 
 #include "duct_poisson.hpp"
 
@@ -7,6 +7,10 @@
 #include <doctest/doctest.h>
 #include <initializer_list>
 #include <numbers>
+
+#include "convelope/correlations/friction/smooth_duct.hpp"
+#include "convelope/correlations/internal/parallel_plates.hpp"
+#include "convelope/correlations/internal/round_duct_laminar.hpp"
 
 using first_principles::cross_section;
 using first_principles::developed_flow;
@@ -23,6 +27,17 @@ double boussinesq(double aspect) {
   }
   return 24.0 / ((1.0 + aspect) * (1.0 + aspect) *
                  (1.0 - 192.0 * aspect / std::pow(std::numbers::pi, 5) * sum));
+}
+
+// the finite volumes with their second-order error taken away
+developed_flow extrapolated(cross_section shape) {
+  const auto coarse = finite_volume(shape, 80);
+  const auto fine = finite_volume(shape, 160);
+  const auto at_zero = [&](auto member) {
+    return fine.*member + (fine.*member - coarse.*member) / 3.0;
+  };
+  return {at_zero(&developed_flow::fanning_re), at_zero(&developed_flow::uniform_flux),
+          at_zero(&developed_flow::uniform_temperature)};
 }
 
 }  // namespace
@@ -100,5 +115,23 @@ TEST_SUITE("first principles: developed ducts") {
           doctest::Approx(140.0 / 17.0).epsilon(0.02));
     CHECK(2.0 * half.uniform_temperature - wide.uniform_temperature ==
           doctest::Approx(7.5407).epsilon(0.025));
+  }
+
+  TEST_CASE("library: round duct and parallel plates") {
+    namespace round = convelope::round_duct;
+    namespace plane = convelope::parallel_plates;
+    const auto same = [](double exact) { return doctest::Approx(exact).epsilon(2e-7); };
+    const auto tube = extrapolated(cross_section::round_tube);
+    // Darcy's factor is four times Fanning's
+    CHECK(100.0 * convelope::friction::hagen_poiseuille::formula(100.0) ==
+          same(4.0 * tube.fanning_re));
+    CHECK(round::laminar_developed_uwt::formula<double>() == same(tube.uniform_temperature));
+    CHECK(round::laminar_developed_uhf::formula<double>() == same(tube.uniform_flux));
+    const auto both = extrapolated(cross_section::plates_both_heated);
+    CHECK(plane::exact_developed_uwt::formula<double>() == same(both.uniform_temperature));
+    CHECK(plane::exact_developed_uhf::formula<double>() == same(both.uniform_flux));
+    const auto one = extrapolated(cross_section::plates_one_heated);
+    CHECK(plane::exact_developed_uwt_one_wall::formula<double>() == same(one.uniform_temperature));
+    CHECK(plane::exact_developed_uhf_one_wall::formula<double>() == same(one.uniform_flux));
   }
 }

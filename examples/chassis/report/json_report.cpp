@@ -69,6 +69,7 @@ nlohmann::ordered_json json_report(const chassis_case& c, const solution& s,
   report["components"] = json::array();
   for (const auto& one : s.components) report["components"].push_back(component_json(c, one));
   report["pieces_without_stated_scatter"] = s.films_without_stated_scatter;
+  report["scatter_where_not_stated"] = c.scatter_where_not_stated;
   report["patches"] = json::array();
   for (const auto& p : s.patches) report["patches"].push_back(patch_json(p));
   report["passages"] = json::array();

@@ -60,10 +60,11 @@ void print_patches(std::ostream& out, const solution& s) {
            outside > 0 ? "outside on " + fixed(100 * outside, 0) + " %" : "inside"});
   }
   t.print(out, 2);
-  out << "\nWhat was used on each patch, and why it is inside or outside\n";
+  out << "\nWhat was used on each patch\n";
   for (const auto& p : s.patches) {
-    out << "  " << p.where << "\n    " << p.words.correlation << "\n    "
-        << groups_text(p.words.groups) << "\n    " << p.words.sentence << "\n";
+    out << "  " << p.where << ": " << p.words.correlation << "\n    " << groups_text(p.words.groups)
+        << "\n";
+    if (p.area_outside > 0) out << "    " << p.words.sentence << "\n";
   }
 }
 
@@ -145,8 +146,12 @@ void print_report(std::ostream& out, const chassis_case& c, const solution& s,
         << celsius(one.lowest_K) << " to " << celsius(one.highest_K) << " C\n";
   }
   if (s.films_without_stated_scatter > 0) {
-    out << "  The band is too narrow: " << s.films_without_stated_scatter
-        << " wall pieces use a correlation whose source states no scatter.\n";
+    out << "  " << s.films_without_stated_scatter
+        << " pieces of wall use a correlation whose source states no scatter; there the band "
+        << (c.scatter_where_not_stated > 0
+                ? "takes +-" + fixed(100 * c.scatter_where_not_stated, 0) +
+                      " %, which the case assumes.\n"
+                : std::string("takes none and is too narrow.\n"));
   }
   out << "\n" << cautions();
 }

@@ -68,7 +68,7 @@ std::string explain(const estimate<K, double>& e) {
   };
   if (!v.finite_input()) add("An input was NaN or infinite; the value means nothing.");
   if (!v.possible_input()) {
-    add("A length was not positive and finite; 1 m was used in its place and the value means nothing.");
+    add("A length or an absolute temperature was not positive and finite; the value means nothing.");
   }
   if (v.refused()) add("The value was refused.");
   if (e.correlation() != nullptr) add(explain(v, *e.correlation()));

@@ -22,6 +22,9 @@ template <class K>
 constexpr bool is_point = std::is_same_v<typename K::unit_type, unit_types::absolute_temperature>;
 template <class K>
 constexpr bool is_number = std::is_same_v<typename K::unit_type, boost::units::si::dimensionless>;
+// A plain constant, because compilers recite every line of a concept that does not hold.
+template <class T>
+constexpr bool is_scalar = scalar<T>;
 }  // namespace detail
 
 /// Anything with a kind: a typed number or an estimate.
@@ -108,8 +111,6 @@ struct gate {
     static_assert(!std::is_integral_v<T>, "write the number with a point: 5.0, not 5");
     return typed<K, T>::from_si(q.value());
   }
-  template <class X>
-  void operator()(const X&) const = delete;  // not a quantity in the kind's SI unit
 };
 
 template <class K>
@@ -117,7 +118,8 @@ template <class K>
 struct gate<K> {
   using kind_type = K;
 
-  template <scalar T>
+  template <class T>
+    requires(detail::is_scalar<T>)
   CONVELOPE_FUNCTION constexpr typed<K, T> operator()(const T& number) const {
     return typed<K, T>::from_si(number);
   }
@@ -130,7 +132,6 @@ template <auto Gate>
 using kind_of = typename std::remove_cvref_t<decltype(Gate)>::kind_type;
 
 namespace detail {
-// Plain constants, because a compiler recites every line of a concept that does not hold.
 template <class A, class K>
 constexpr bool is_of_kind = false;
 template <has_kind A, class K>

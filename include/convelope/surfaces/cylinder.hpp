@@ -49,7 +49,7 @@ struct cylinder_in_crossflow {
     const P forced_share = P(plain(F4) / plain(sum));
     const P natural_share = P(plain(N4) / plain(sum));
     const bits_t<T> bits(bits_t<T>(d.bits) | f.check(at, p) |
-                         detail::finite<T>(wall, ambient, p, s.velocity.si()) |
+                         detail::sound<T>(wall, ambient, p, s.velocity.si(), gravity.si()) |
                          detail::asked<forced, T>(0, forced_share, Re, Pr) |
                          detail::asked<natural, T>(1, natural_share, Ra, Pr));
     return detail::film_of(math::power<1, 4>(sum), v.conductivity, d.metres, ambient, bits,

@@ -66,7 +66,7 @@ CONVELOPE_FUNCTION constexpr film<T> duct_film(const Fluid& f, const duct_flow<T
   const P turbulent_share = plain(w);
   const P laminar_share = complement(turbulent_share);
   const bits_t<T> bits(bits_t<T>(d.bits | l.bits | end.bits | start_bits) | f.check(bulk, p) |
-                       f.check(wall, p) | finite<T>(wall, bulk, p, s.velocity.si()) |
+                       f.check(wall, p) | sound<T>(wall, bulk, p, s.velocity.si()) |
                        Laminar::template verdict_bits<T>(0, laminar_share, Re, Pr, L_over_D) |
                        asked<turbulent, T>(1, turbulent_share, Re, Pr, L_over_D, Pr_ratio,
                                            T_ratio));

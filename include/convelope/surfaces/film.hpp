@@ -119,6 +119,18 @@ struct usable_length {
   }
 };
 
+/// A transition Reynolds number to divide by: itself if positive and finite, else 5e5.
+struct usable_transition {
+  double Re;
+  std::uint64_t bits;
+
+  CONVELOPE_FUNCTION constexpr explicit usable_transition(
+      const typed<kinds::transition_reynolds>& given)
+      : Re(5e5), bits(usable_length(given.si()).bits) {
+    if (bits == 0) Re = given.si();
+  }
+};
+
 /// Everything a geometry has found, put together: h = Nu k / L.
 template <class T, class... Share>
 CONVELOPE_FUNCTION constexpr film<T> film_of(const T& Nu, const T& conductivity, double length,
@@ -138,6 +150,16 @@ CONVELOPE_FUNCTION constexpr bits_t<T> finite(const X&... x) {
   ((bits = bits_t<T>(bits | scalar_adaptor<T>::bits_where_not_finite(T(x), word::not_finite))),
    ...);
   return bits;
+}
+
+/// Bits of a state that can't be: a number that is NaN or infinite, a temperature not above 0 K.
+template <class T, class... X>
+CONVELOPE_FUNCTION constexpr bits_t<T> sound(const T& wall, const T& stream, const X&... others) {
+  using adaptor = scalar_adaptor<T>;
+  const T zero = adaptor::constant(0.0);
+  return bits_t<T>(finite<T>(wall, stream, others...) |
+                   adaptor::bits_where(!(wall > zero), word::impossible) |
+                   adaptor::bits_where(!(stream > zero), word::impossible));
 }
 }  // namespace detail
 

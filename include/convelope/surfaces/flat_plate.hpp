@@ -50,19 +50,20 @@ struct plate_along_stream {
                                                const T& wall) const {
     using P = plain_t<T>;
     const detail::usable_length l(length.si());
+    const detail::usable_transition turning(transition);
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
     const T at = T(0.5 * (wall + ambient));
     const fluid_values<T> v = f.values(at, p);
     const T Pr = v.prandtl();
     const T Re = detail::rounded_reynolds(v, s.velocity.si(), l.metres);
-    const detail::plate_layer<T> layer(Re, Pr, transition.si());
+    const detail::plate_layer<T> layer(Re, Pr, turning.Re);
 
     const P turbulent = layer.turbulent_share;
     const P laminar = detail::complement(turbulent);
-    const T Re_c = scalar_adaptor<T>::constant(transition.si());
-    const bits_t<T> bits(bits_t<T>(l.bits) | f.check(at, p) |
-                         detail::finite<T>(wall, ambient, p, s.velocity.si()) |
+    const T Re_c = scalar_adaptor<T>::constant(turning.Re);
+    const bits_t<T> bits(bits_t<T>(l.bits | turning.bits) | f.check(at, p) |
+                         detail::sound<T>(wall, ambient, p, s.velocity.si()) |
                          detail::asked<layer_laminar, T>(0, laminar, Re, Pr) |
                          detail::asked<layer_turbulent, T>(1, turbulent, Re, Pr, Re_c));
     return detail::film_of(layer.Nu, v.conductivity, l.metres, ambient, bits,

@@ -1,7 +1,8 @@
 #ifndef CONVELOPE_SURFACES_HORIZONTAL_PLATE_HPP
 #define CONVELOPE_SURFACES_HORIZONTAL_PLATE_HPP
 
-#include "convelope/correlations/natural/horizontal_plate.hpp"
+#include "convelope/correlations/natural/horizontal_plate_down.hpp"
+#include "convelope/correlations/natural/horizontal_plate_up.hpp"
 #include "convelope/surfaces/flat_plate.hpp"
 
 namespace convelope {
@@ -38,6 +39,7 @@ struct horizontal_wall {
     using P = plain_t<T>;
     const detail::usable_length b(area_over_perimeter.si());
     const detail::usable_length l(length.si());
+    const detail::usable_transition turning(transition);
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
     const T at = T(0.5 * (wall + ambient));
@@ -54,7 +56,7 @@ struct horizontal_wall {
     const T natural_Nu = math::weighted(driving::formula(Ra, Pr), holding::formula(Ra, Pr), w);
 
     const T Re = detail::rounded_reynolds(v, s.velocity.si(), l.metres);
-    const detail::plate_layer<T> layer(Re, Pr, transition.si());
+    const detail::plate_layer<T> layer(Re, Pr, turning.Re);
     // Both on A/P.
     const T F_on_b = T(layer.Nu * (b.metres / l.metres));
     const T Fn = math::power<7, 2>(F_on_b);
@@ -64,8 +66,8 @@ struct horizontal_wall {
     const P forced_share = P(plain(Fn) / plain(sum));
     const P holding_share = P(plain(w) * detail::complement(forced_share));
     const P driving_share = P(detail::complement(plain(w)) * detail::complement(forced_share));
-    const bits_t<T> bits(bits_t<T>(b.bits | l.bits) | f.check(at, p) |
-                         detail::finite<T>(wall, ambient, p, s.velocity.si()) |
+    const bits_t<T> bits(bits_t<T>(b.bits | l.bits | turning.bits) | f.check(at, p) |
+                         detail::sound<T>(wall, ambient, p, s.velocity.si(), gravity.si()) |
                          detail::asked<driving, T>(0, driving_share, Ra, Pr) |
                          detail::asked<holding, T>(1, holding_share, Ra, Pr) |
                          detail::asked<forced, T>(2, forced_share, Re, Pr));

@@ -57,7 +57,7 @@ struct sphere_in_stream {
     const P natural_share = P(plain(N4) / plain(sum));
     const bits_t<T> bits(bits_t<T>(d.bits) | f.check(at, p) | f.check(wall, p) |
                          f.check(ambient, p) |
-                         detail::finite<T>(wall, ambient, p, s.velocity.si()) |
+                         detail::sound<T>(wall, ambient, p, s.velocity.si(), gravity.si()) |
                          detail::asked<forced, T>(0, forced_share, Re, Pr_stream, mu_ratio) |
                          detail::asked<natural, T>(1, natural_share, Ra, Pr_film));
     return detail::film_of(math::power<1, 4>(sum), at_film.conductivity, d.metres, ambient, bits,

@@ -40,7 +40,7 @@ struct open_vertical_channel {
 
     const P all = scalar_adaptor<P>::constant(1.0);
     const bits_t<T> bits(bits_t<T>(b.bits | h.bits) | f.check(at, p) |
-                         detail::finite<T>(wall, ambient, p) |
+                         detail::sound<T>(wall, ambient, p, gravity.si()) |
                          detail::asked<natural, T>(0, all, El));
     return detail::film_of(natural::formula(El), v.conductivity, b.metres, ambient, bits,
                            detail::variance_of<natural, T>(), all);

@@ -50,6 +50,7 @@ struct vertical_wall {
                                                const T& wall) const {
     using P = plain_t<T>;
     const detail::usable_length h(height.si());
+    const detail::usable_transition turning(transition);
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
     const T at = T(0.5 * (wall + ambient));
@@ -67,7 +68,7 @@ struct vertical_wall {
 
     const T Re_signed = T(h.metres * v.density * u / v.viscosity);
     const T Re = math::smooth_magnitude(Re_signed, detail::least_reynolds);
-    const detail::plate_layer<T> layer(Re, Pr, transition.si());
+    const detail::plate_layer<T> layer(Re, Pr, turning.Re);
 
     const T F3 = math::power<3>(layer.Nu);
     const T N3 = math::power<3>(natural_Nu);
@@ -78,8 +79,8 @@ struct vertical_wall {
     const P forced_share = P(f6 / (f6 + n6));
     const P turbulent = P(plain(w) * detail::complement(forced_share));
     const P laminar = P(detail::complement(plain(w)) * detail::complement(forced_share));
-    const bits_t<T> bits(bits_t<T>(h.bits) | f.check(at, p) |
-                         detail::finite<T>(wall, ambient, p, u) |
+    const bits_t<T> bits(bits_t<T>(h.bits | turning.bits) | f.check(at, p) |
+                         detail::sound<T>(wall, ambient, p, u, gravity.si()) |
                          detail::asked<natural_laminar, T>(0, laminar, Ra, Pr) |
                          detail::asked<natural_all, T>(1, turbulent, Ra, Pr) |
                          detail::asked<forced, T>(2, forced_share, Re, Pr));

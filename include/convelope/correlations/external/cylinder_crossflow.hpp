@@ -40,7 +40,7 @@ struct churchill_bernstein_1977 : correlation<churchill_bernstein_1977, nusselt_
 /// The same between Re 2e4 and 4e5, where the one formula is up to 20 % low.
 /// Nu = 0.3 + 0.62 Re^(1/2) Pr^(1/3) / [1 + (0.4/Pr)^(2/3)]^(1/4) [1 + (Re/282000)^(1/2)]
 /// Re: on D and the undisturbed velocity. Film temperature. Range: Re 2e4 .. 4e5, Re Pr >= 0.2.
-/// It doesn't join the other at the ends: in air 12 % above it at 2e4, 6 % at 4e5.
+/// It doesn't join the other at the ends: in air 10 % above it at 2e4, 15 % at 4e5.
 /// Source: Churchill and Bernstein 1977, J. Heat Transfer 99, 300-306.
 struct churchill_bernstein_1977_midrange
     : correlation<churchill_bernstein_1977_midrange, nusselt_of<diameter>, reynolds_of<diameter>,

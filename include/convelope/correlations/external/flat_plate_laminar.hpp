@@ -13,7 +13,7 @@ namespace flat_plate {
 /// Local Nusselt number, laminar, uniform wall temperature: Nu_x = 0.332 Re_x^(1/2) Pr^(1/3).
 /// Re: on the distance from the edge and the undisturbed velocity. Film temperature.
 /// Range: Re 1e3 (boundary-layer theory) .. 5e5, Pr 0.6 .. 60. No scatter stated; against the
-/// boundary-layer equations +1.2 % at Pr 0.6, exact at 1, -2.0 % at 60. Pr 0.1: 10 % high.
+/// boundary-layer equations +1.1 % at Pr 0.6, exact at 1, -2.0 % at 60. Pr 0.1: 10 % high.
 /// Source: Pohlhausen 1921, on the flow of Blasius 1908.
 struct laminar_isothermal_local
     : correlation<laminar_isothermal_local, local_nusselt_of<distance_from_edge>,

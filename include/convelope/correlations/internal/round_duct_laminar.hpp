@@ -52,7 +52,7 @@ struct laminar_developed_uhf : correlation<laminar_developed_uhf, nusselt_of<hyd
 
 /// Local, uniform wall temperature, velocity developed: fit of Graetz's solution.
 /// x <= 0.001: 1.077 x^(-1/3) - 0.7; above: 3.657 + 6.874 (1000 x)^(-0.488) exp(-57.2 x), x =
-/// x_star. Steps by 0.8 % at 0.001. Range: x_star >= 1e-6, Re <= 2300. Scatter +-3 % of the
+/// x_star. Steps by +0.8 % at 0.001. Range: x_star >= 1e-6, Re <= 2300. Scatter +-3 % of the
 /// solution. Source: Shah 1975, 3rd Natl. Heat Mass Transfer Conf., HMT-11-75; Shah and London
 /// 1978.
 struct shah_1975_uwt_local
@@ -103,8 +103,8 @@ struct shah_1975_uwt_mean
 /// Local, uniform heat flux, velocity developed: fit of the exact solution.
 /// x <= 5e-5: 1.302 x^(-1/3) - 1; to 0.0015: 1.302 x^(-1/3) - 0.5;
 /// above: 4.364 + 8.68 (1000 x)^(-0.506) exp(-41 x), x = x_star.
-/// Steps by 2 % at 5e-5 and by 1 % at 0.0015. Range: x_star >= 1e-6, Re <= 2300. Scatter +-3 %.
-/// Source: Shah 1975, 3rd Natl. Heat Mass Transfer Conf., HMT-11-75; Shah and London 1978.
+/// Steps by +1.5 % at 5e-5 and by +1.0 % at 0.0015. Range: x_star >= 1e-6, Re <= 2300. Scatter +-3
+/// %. Source: Shah 1975, 3rd Natl. Heat Mass Transfer Conf., HMT-11-75; Shah and London 1978.
 struct shah_1975_uhf_local
     : correlation<shah_1975_uhf_local, local_nusselt_of<hydraulic_diameter>, thermal_entry> {
   static constexpr const char* id = "round-duct/shah-1975-uhf";
@@ -127,7 +127,7 @@ struct shah_1975_uhf_local
 
 /// Mean of Nu_x, uniform heat flux, velocity developed: fit of the exact solution.
 /// x <= 0.03: 1.953 x^(-1/3); above: 4.364 + 0.0722/x. Steps by +7.7 % at 0.03, as published.
-/// Range: x_star >= 1e-6, Re <= 2300. Scatter +-3 % by the source; 3.9 % at worst next to 0.03.
+/// Range: x_star >= 1e-6, Re <= 2300. Scatter +-3 % by the source; 4.3 % at worst next to 0.03.
 /// Source: Shah 1975, 3rd Natl. Heat Mass Transfer Conf., HMT-11-75; Shah and London 1978.
 struct shah_1975_uhf_mean
     : correlation<shah_1975_uhf_mean, nusselt_of<hydraulic_diameter>, thermal_entry> {

@@ -24,7 +24,7 @@ struct goldstein_sparrow_jones_low_1973
   static constexpr reference source{
       "R. J. Goldstein, E. M. Sparrow, D. C. Jones", 1973,
       "Int. J. Heat Mass Transfer 16, 1025-1035", known::quoted,
-      "4.6 % below goldstein-sparrow-jones-1973 where they meet at Ra 200"};
+      "4.6 % above goldstein-sparrow-jones-1973 where they meet, at Ra 200"};
   static constexpr auto envelope = within(limit<rayleigh_of<area_over_perimeter>>(1.0, 200.0));
   static constexpr double scatter = not_stated;
   static constexpr state_rule state_at = state_rule::film;

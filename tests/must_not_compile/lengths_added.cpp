@@ -1,0 +1,11 @@
+// names: diameter, gap
+#include "convelope/kinds/kinds.hpp"
+
+using namespace convelope;
+
+const auto d = diameter(0.05 * units::metre);
+#ifdef TWIN
+const auto x = d + diameter(0.01 * units::metre);
+#else
+const auto x = d + gap(0.01 * units::metre);
+#endif
