@@ -61,7 +61,7 @@ void write_files(const options& o, const equations& system, const newton_result&
   std::set<std::string> taken;
   for (std::size_t b = 0; b < system.of().boards.size(); ++b) {
     auto name = file_name_of(system.of().boards[b].name);
-    while (!taken.insert(name).second) name += "-" + std::to_string(b);
+    while (!taken.insert(name).second) name.append("-").append(std::to_string(b));
     write(folder / (name + ".svg"), svg_map(system, run.x, s, b, scale));
     write(folder / (name + ".vtk"), vtk_file(system, run.x, b));
     out << "wrote " << (folder / (name + ".svg")).string() << " and .vtk\n";

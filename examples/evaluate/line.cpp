@@ -18,10 +18,18 @@ std::string shortest(double x) {
   return {buffer.data(), r.ptr};
 }
 
+constexpr std::string_view blanks = " \t\r";
+
+std::string_view trim(std::string_view s) {
+  const std::size_t a = s.find_first_not_of(blanks);
+  if (a == std::string_view::npos) return {};
+  return s.substr(a, s.find_last_not_of(blanks) - a + 1);
+}
+
 bool parse_number(std::string_view text, double& x) {
   const char* begin = text.data();
   const char* end = begin + text.size();
-  if (!text.empty() && text.front() == '+') ++begin;
+  if (text.size() > 1 && text[0] == '+' && text[1] != '-') ++begin;
   const auto r = std::from_chars(begin, end, x);
   return r.ec == std::errc{} && r.ptr == end && std::isfinite(x);
 }
@@ -83,8 +91,8 @@ std::string add_pair(std::string_view text, request& r) {
   if (eq == std::string_view::npos || eq == 0) {
     return "'" + std::string(text) + "': expected key=value";
   }
-  const std::string key(text.substr(0, eq));
-  const std::string value(text.substr(eq + 1));
+  const std::string key(trim(text.substr(0, eq)));
+  const std::string value(trim(text.substr(eq + 1)));
   if (key == "quantity") {
     if (!r.quantity.empty()) return "quantity: given twice";
     r.quantity = value;
@@ -97,13 +105,12 @@ std::string add_pair(std::string_view text, request& r) {
   return {};
 }
 
-std::string parse_line(std::string_view line, request& r) {
-  constexpr std::string_view blanks = " \t\r";
-  const auto trim = [&](std::string_view s) {
-    const std::size_t a = s.find_first_not_of(blanks);
-    if (a == std::string_view::npos) return std::string_view{};
-    return s.substr(a, s.find_last_not_of(blanks) - a + 1);
-  };
+std::string parse_line(std::string_view given, request& r) {
+  // Ids and keys are ASCII. Other bytes need not be UTF-8, which JSON is: they become '?'.
+  std::string ascii(given);
+  std::replace_if(
+      ascii.begin(), ascii.end(), [](char c) { return (c & 0x80) != 0; }, '?');
+  std::string_view line = ascii;
   line = trim(line);
   const std::size_t gap = line.find_first_of(blanks);
   r.id = std::string(line.substr(0, gap));

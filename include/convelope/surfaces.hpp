@@ -1,6 +1,7 @@
 #ifndef CONVELOPE_SURFACES_HPP
 #define CONVELOPE_SURFACES_HPP
 
+#include "convelope/surfaces/buoyancy.hpp"
 #include "convelope/surfaces/cylinder.hpp"
 #include "convelope/surfaces/duct.hpp"
 #include "convelope/surfaces/exposure.hpp"

@@ -131,6 +131,10 @@ TEST_CASE("annular gap: records") {
   expect_record<tachibana_1960>("annular-gap/tachibana-1960", "Nu_2b", not_stated, walls);
   expect_record<aoki_1967>("annular-gap/aoki-1967", "Nu_2b", not_stated, walls);
   expect_record<conduction_limit>("annular-gap/conduction-limit", "Nu_2b", 0.0, walls);
+  expect_keys<taylor_gazley>("Ta", "Pr");
+  expect_keys<becker_kaye_1962>("Ta_m");
+  expect_keys<geometry>("b_over_rm");
+  expect_keys<conduction_limit>("eta");
 }
 
 }  // namespace

@@ -7,6 +7,7 @@
 //   expect_crossed<C>(i, side, inputs...)    limit i crossed on that side, and nothing else
 //   expect_also_crossed<C>(i, side, ...)     the same where other limits are crossed too
 //   expect_record<C>(id, quantity, ...)      what it says of itself
+//   expect_keys<C>("Re", "Pr")               the names of its inputs in a batch line
 //   expect_not_finite<C>(inputs...)          NaN or infinity in any input is told
 // Inputs are doubles in the order of C's gates, enumerators for choices.
 
@@ -244,6 +245,19 @@ void expect_record(const char* id, const char* quantity, double scatter,
   CHECK(convelope::detail::same_text(C::quantity, quantity));
   CHECK(C::scatter == scatter);
   CHECK(C::state_at == state_at);
+}
+
+/// The names a batch line gives the inputs, in order.
+template <class C, class... Key>
+void expect_keys(const Key*... keys) {
+  INFO(detail::text(C::id));
+  REQUIRE(C::input_count == static_cast<int>(sizeof...(Key)));
+  std::size_t i = 0;
+  const auto one = [&](const char* key) {
+    INFO(detail::text(key));
+    CHECK(convelope::detail::same_text(convelope::detail::input_table<C>[i++].key, key));
+  };
+  (one(keys), ...);
 }
 
 /// Nothing is said against the answer for these inputs.

@@ -279,6 +279,7 @@ TEST_SUITE("duct friction") {
     check_value<H>(exact(0.60) / (1 + exact(0.035) * 2300) + exact(0.056) * 2300, 2300.0, 6.0);
     check_scalars<H>(70.0, 1.0);
     expect_inside<H>(0.0, 1.0);
+    expect_inside<H>(2300.0, 1.0);
     expect_crossed<H>(0, side::above, above(2300.0), 1.0);
     expect_crossed<H>(0, side::below, -1.0, 1.0);
     expect_not_finite<H>(100.0, 1.0);
@@ -288,6 +289,8 @@ TEST_SUITE("duct friction") {
     check_value<L>(exact(0.05) * 2300 * exact(0.7), 2300.0, 0.7);
     check_value<L>(exact(0.05) * 3 * 900, 3.0, 900.0);
     check_scalars<L>(1000.0, 6.0);
+    expect_inside<L>(0.0, 1.0);
+    expect_inside<L>(2300.0, 0.0);
     expect_crossed<L>(0, side::above, above(2300.0), 1.0);
     expect_crossed<L>(0, side::below, -1.0, 1.0);
     expect_crossed<L>(1, side::below, 100.0, -0.7);
@@ -298,6 +301,7 @@ TEST_SUITE("duct friction") {
     check_value<V>(exact(1.359) * raised(1e6, 0.25), 1e6);
     check_value<V>(exact(13.59), 1e4);
     check_scalars<V>(5e4);
+    expect_inside<V>(1e4);
     expect_crossed<V>(0, side::below, below(1e4));
     expect_not_finite<V>(5e4);
   }
@@ -320,6 +324,7 @@ TEST_SUITE("duct friction") {
     expect_crossed<C>(0, side::below, above(10.0), regime::laminar, direction::heating);
     expect_inside<C>(above(0.5), regime::turbulent, direction::cooling);
     expect_crossed<C>(1, side::above, below(0.5), regime::turbulent, direction::cooling);
+    expect_inside<C>(below(1.0 / 0.3), regime::turbulent, direction::heating);
     expect_crossed<C>(1, side::below, above(1.0 / 0.3), regime::turbulent, direction::heating);
     expect_not_finite<C>(2.0, regime::laminar, direction::heating);
   }

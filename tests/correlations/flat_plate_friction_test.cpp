@@ -60,6 +60,8 @@ TEST_CASE("plate friction: records") {
   expect_record<power_law_local>("flat-plate-friction/power-law-local", "cf_x", not_stated, film);
   expect_record<power_law_average>("flat-plate-friction/power-law-average", "Cf_L", not_stated,
                                    film);
+  expect_keys<blasius_local>("Re");
+  expect_keys<blasius_average>("Re");
 }
 
 }  // namespace

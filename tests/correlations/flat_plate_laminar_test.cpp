@@ -1,3 +1,5 @@
+#include <cmath>
+
 #include "check.hpp"
 #include "convelope/correlations/external/flat_plate.hpp"
 
@@ -40,7 +42,9 @@ TEST_CASE("laminar plate, every Prandtl number: against plain powers in 50 digit
 TEST_CASE("laminar isothermal plate: the published heat transfer coefficients of Pohlhausen") {
   const double table[][2] = {{0.6, 0.276}, {0.7, 0.293}, {0.8, 0.307},  {0.9, 0.320}, {1.0, 0.332},
                              {1.1, 0.344}, {7.0, 0.645}, {10.0, 0.730}, {15.0, 0.835}};
-  for (const auto& [Pr, a1] : table) {
+  for (const auto& row : table) {
+    const double Pr = row[0];
+    const double a1 = row[1];
     CAPTURE(Pr);
     CHECK(laminar_isothermal_local::formula(1.0, Pr) == doctest::Approx(a1).epsilon(0.021));
     CHECK(churchill_ozoe_1973_isothermal_local::formula(1.0, Pr) ==
@@ -81,6 +85,7 @@ TEST_CASE("laminar plate: envelopes") {
   const auto any_prandtl = []<class C>(C) {
     expect_inside<C>(5e5, 1e3);
     expect_inside<C>(1e5, 0.001);
+    expect_inside<C>(1e-3, 1e6);
     expect_crossed<C>(0, side::above, above(5e5), 1.0);
     expect_also_crossed<C>(0, side::below, -1e3, -1.0);
     expect_also_crossed<C>(1, side::below, -1e3, -1.0);
@@ -137,6 +142,8 @@ TEST_CASE("laminar plate: records") {
                                                    "Nu_x", not_stated, film);
   expect_record<laminar_low_prandtl_local>("flat-plate/laminar-low-prandtl-local", "Nu_x",
                                            not_stated, film);
+  expect_keys<laminar_isothermal_local>("Re", "Pr");
+  expect_keys<laminar_isothermal_average>("Re", "Pr");
 }
 
 }  // namespace

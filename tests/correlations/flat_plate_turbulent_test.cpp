@@ -1,3 +1,5 @@
+#include <cmath>
+
 #include "check.hpp"
 #include "convelope/correlations/external/flat_plate.hpp"
 
@@ -153,6 +155,7 @@ TEST_CASE("turbulent plate: records") {
       state_rule::free_stream);
   expect_record<gnielinski_1975_combined_average>("flat-plate/gnielinski-1975-combined-average",
                                                   "Nu_L", not_stated, state_rule::free_stream);
+  expect_keys<mixed_average>("Re", "Pr", "Re_c");
 }
 
 }  // namespace

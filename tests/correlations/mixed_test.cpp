@@ -1,7 +1,8 @@
 // Forced and natural convection together.
 
-#include <cmath>
 #include <doctest/doctest.h>
+
+#include <cmath>
 #include <type_traits>
 
 #include "check.hpp"
@@ -19,7 +20,8 @@ using on_diameter = mixed::churchill_assisting_1977<diameter>;
 struct point {
   double F, N, n;
 };
-constexpr point points[] = {{10.0, 1.0, 3.0}, {3.0, 100.0, 3.5}, {40.0, 39.0, 4.0}, {7.0, 7.5, 3.0}};
+constexpr point points[] = {
+    {10.0, 1.0, 3.0}, {3.0, 100.0, 3.5}, {40.0, 39.0, 4.0}, {7.0, 7.5, 3.0}};
 
 }  // namespace
 
@@ -31,7 +33,8 @@ TEST_SUITE("correlations: mixed") {
       check_value<assisting>(pow(exact(a + b), exact(1) / n), F, N, n);
       check_value<on_diameter>(pow(exact(a + b), exact(1) / n), F, N, n);
     }
-    for (const auto& [F, N, n] : {point{10.0, 1.0, 3.0}, point{3.0, 100.0, 3.5}, point{4.0, 2.0, 4.0}}) {
+    for (const auto& [F, N, n] :
+         {point{10.0, 1.0, 3.0}, point{3.0, 100.0, 3.5}, point{4.0, 2.0, 4.0}}) {
       const exact a = pow(exact(F), exact(n));
       const exact b = pow(exact(N), exact(n));
       check_value<opposing>(pow(exact(abs(exact(a - b))), exact(1) / n), F, N, n);
@@ -49,7 +52,8 @@ TEST_SUITE("correlations: mixed") {
     // 3^3 + 4^3 + 5^3 = 6^3; 9^3 + 10^3 = 12^3 + 1^3
     const double two = assisting::formula(4.0, 5.0, 3.0);
     CHECK(assisting::formula(3.0, two, 3.0) == doctest::Approx(6.0));
-    CHECK(assisting::formula(9.0, 10.0, 3.0) == doctest::Approx(assisting::formula(12.0, 1.0, 3.0)));
+    CHECK(assisting::formula(9.0, 10.0, 3.0) ==
+          doctest::Approx(assisting::formula(12.0, 1.0, 3.0)));
     CHECK(opposing::formula(6.0, two, 3.0) == doctest::Approx(3.0));
     CHECK(opposing::formula(two, 6.0, 3.0) == doctest::Approx(3.0));
   }
@@ -71,15 +75,16 @@ TEST_SUITE("correlations: mixed") {
   TEST_CASE("envelopes") {
     expect_inside<assisting>(0.0, 0.0, 3.0);
     expect_inside<assisting>(10.0, 10.0, 4.0);
-    expect_crossed<assisting>(0, side::below, -1.0, 10.0, 3.0);
-    expect_crossed<assisting>(1, side::below, 10.0, -1.0, 3.0);
+    expect_crossed<assisting>(0, side::below, -1e-9, 10.0, 3.0);
+    expect_crossed<assisting>(1, side::below, 10.0, -1e-9, 3.0);
     expect_crossed<assisting>(2, side::below, 10.0, 1.0, below(3.0));
     expect_crossed<assisting>(2, side::above, 10.0, 1.0, above(4.0));
     expect_not_finite<assisting>(10.0, 1.0, 3.0);
     expect_inside<opposing>(10.0, 0.0, 3.0);
     expect_inside<opposing>(0.0, 10.0, 4.0);
-    expect_also_crossed<opposing>(0, side::below, -1.0, 10.0, 3.0);
-    expect_also_crossed<opposing>(1, side::below, 10.0, -1.0, 3.0);
+    expect_also_crossed<opposing>(0, side::below, -1e-9, 10.0, 3.0);
+    expect_also_crossed<opposing>(1, side::below, 10.0, -1e-9, 3.0);
+    expect_also_crossed<opposing>(3, side::below, 10.0, -1e-9, 3.0);
     expect_crossed<opposing>(2, side::below, 10.0, 1.0, below(3.0));
     expect_crossed<opposing>(2, side::above, 10.0, 1.0, above(4.0));
     expect_inside<opposing>(3.0, below(1.0), 3.0);

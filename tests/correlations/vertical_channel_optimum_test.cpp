@@ -2,9 +2,10 @@
 
 #include "convelope/correlations/natural/vertical_channel_optimum.hpp"
 
+#include <doctest/doctest.h>
+
 #include <algorithm>
 #include <cmath>
-#include <doctest/doctest.h>
 #include <initializer_list>
 
 #include "check.hpp"
@@ -60,32 +61,34 @@ TEST_SUITE("correlations: vertical channel, optimum") {
       return best([=](double s) { return Nu(std::pow(s, power)) / (s * s); }, 0.5, 6.0);
     };
     CHECK(isothermal::formula(1.0, heated_walls::both) ==
-          doctest::Approx(stack(
-                              [](double El) {
-                                return channel::bar_cohen_rohsenow_isothermal_symmetric_1984::formula(
-                                    El);
-                              },
-                              4.0))
+          doctest::Approx(
+              stack(
+                  [](double El) {
+                    return channel::bar_cohen_rohsenow_isothermal_symmetric_1984::formula(El);
+                  },
+                  4.0))
               .epsilon(1e-3));
     CHECK(isothermal::formula(1.0, heated_walls::one) ==
-          doctest::Approx(stack(
-                              [](double El) {
-                                return channel::bar_cohen_rohsenow_isothermal_one_side_1984::formula(
-                                    El);
-                              },
-                              4.0))
+          doctest::Approx(
+              stack(
+                  [](double El) {
+                    return channel::bar_cohen_rohsenow_isothermal_one_side_1984::formula(El);
+                  },
+                  4.0))
               .epsilon(1e-3));
     CHECK(isoflux::formula(1.0, heated_walls::both, excess_taken::at_exit) ==
           doctest::Approx(stack(
                               [](double El) {
-                                return channel::bar_cohen_rohsenow_isoflux_symmetric_1984::formula(El);
+                                return channel::bar_cohen_rohsenow_isoflux_symmetric_1984::formula(
+                                    El);
                               },
                               5.0))
               .epsilon(2e-3));
     CHECK(isoflux::formula(1.0, heated_walls::one, excess_taken::at_exit) ==
           doctest::Approx(stack(
                               [](double El) {
-                                return channel::bar_cohen_rohsenow_isoflux_one_side_1984::formula(El);
+                                return channel::bar_cohen_rohsenow_isoflux_one_side_1984::formula(
+                                    El);
                               },
                               5.0))
               .epsilon(4e-3));
@@ -93,7 +96,8 @@ TEST_SUITE("correlations: vertical channel, optimum") {
           doctest::Approx(
               stack(
                   [](double El) {
-                    return channel::bar_cohen_rohsenow_isoflux_symmetric_midheight_1984::formula(El);
+                    return channel::bar_cohen_rohsenow_isoflux_symmetric_midheight_1984::formula(
+                        El);
                   },
                   5.0))
               .epsilon(1e-3));

@@ -25,9 +25,7 @@ inline double blasius_wall_shear() {
   namespace odeint = boost::numeric::odeint;
   using state = std::array<double, 3>;
   state y{0.0, 0.0, 1.0};
-  const auto rhs = [](const state& s, state& ds, double) {
-    ds = {s[1], s[2], -0.5 * s[0] * s[2]};
-  };
+  const auto rhs = [](const state& s, state& ds, double) { ds = {s[1], s[2], -0.5 * s[0] * s[2]}; };
   odeint::integrate_adaptive(
       odeint::make_controlled<odeint::runge_kutta_fehlberg78<state>>(1e-14, 1e-14), rhs, y, 0.0,
       16.0, 0.01);

@@ -1,11 +1,12 @@
 #pragma once
 
-// How far a correlation stands from a solution over a range of its inputs, as a two-sided check: both
-// ends of the band of deviations have to lie where stated, so that a constant that is off by more
-// than the width of the stated interval fails.
+// How far a correlation stands from a solution over a range of its inputs, as a two-sided check:
+// both ends of the band of deviations have to lie where stated, so that a constant that moves them
+// fails.
+
+#include <doctest/doctest.h>
 
 #include <algorithm>
-#include <doctest/doctest.h>
 #include <initializer_list>
 
 namespace first_principles {
@@ -26,11 +27,12 @@ interval deviations(std::initializer_list<double> points, const Ratio& ratio) {
   return band;
 }
 
-inline void check_band(const interval& band, const interval& low, const interval& high) {
-  CHECK(band.low > low.low);
-  CHECK(band.low < low.high);
-  CHECK(band.high > high.low);
-  CHECK(band.high < high.high);
+/// Both ends of the band, per cent, to within so many per cent.
+inline void check_band(const interval& band, double least, double greatest, double within = 0.02) {
+  CHECK(band.low > least - within);
+  CHECK(band.low < least + within);
+  CHECK(band.high > greatest - within);
+  CHECK(band.high < greatest + within);
 }
 
 }  // namespace first_principles

@@ -33,7 +33,8 @@ inline developed_flow finite_volume(cross_section shape, Eigen::Index n) {
   for (Eigen::Index i = 0; i <= n; ++i) {
     face[i] = tube ? step * static_cast<double>(i) : 1.0;
   }
-  for (Eigen::Index i = 0; i < n; ++i) volume[i] = step * (tube ? 0.5 * (face[i] + face[i + 1]) : 1.0);
+  for (Eigen::Index i = 0; i < n; ++i)
+    volume[i] = step * (tube ? 0.5 * (face[i] + face[i + 1]) : 1.0);
 
   // symmetric tridiagonal operator; a wall stands half a cell from the first or last centre
   const auto solve = [&](const Eigen::ArrayXd& source, bool left_wall, bool right_wall) {
@@ -91,8 +92,8 @@ inline developed_flow rectangular_duct(double aspect, Eigen::Index modes = 16) {
   Eigen::MatrixXd value(points, modes);
   Eigen::MatrixXd slope(points, modes);
   for (Eigen::Index k = 0; k < modes; ++k) {
-    const double ratio = std::sqrt((4.0 * static_cast<double>(k) + 1.0) /
-                                   (4.0 * static_cast<double>(k) + 5.0));
+    const double ratio =
+        std::sqrt((4.0 * static_cast<double>(k) + 1.0) / (4.0 * static_cast<double>(k) + 5.0));
     value.col(k) = table.value.col(2 * k) - ratio * table.value.col(2 * k + 2);
     slope.col(k) = table.slope.col(2 * k) - ratio * table.slope.col(2 * k + 2);
   }

@@ -3,8 +3,9 @@
 
 #include "duct_poisson.hpp"
 
-#include <cmath>
 #include <doctest/doctest.h>
+
+#include <cmath>
 #include <initializer_list>
 #include <numbers>
 
@@ -50,20 +51,20 @@ TEST_SUITE("first principles: developed ducts") {
     };
     // Shah and London 1978: 16, 48/11, 3.656793; 24, 140/17, 7.540701; one wall heated, the other
     // insulated 70/13, 4.860737
-    for (const auto& [shape, value] :
+    for (const auto& at :
          {exact{cross_section::round_tube, {16.0, 48.0 / 11.0, 3.656793458}},
           exact{cross_section::plates_both_heated, {24.0, 140.0 / 17.0, 7.540700874}},
           exact{cross_section::plates_one_heated, {24.0, 70.0 / 13.0, 4.860737}}}) {
-      CAPTURE(static_cast<int>(shape));
-      const auto coarse = finite_volume(shape, 40);
-      const auto medium = finite_volume(shape, 80);
-      const auto fine = finite_volume(shape, 160);
+      CAPTURE(static_cast<int>(at.shape));
+      const auto coarse = finite_volume(at.shape, 40);
+      const auto medium = finite_volume(at.shape, 80);
+      const auto fine = finite_volume(at.shape, 160);
       for (const auto member : {&developed_flow::fanning_re, &developed_flow::uniform_flux,
                                 &developed_flow::uniform_temperature}) {
         const double first = medium.*member - coarse.*member;
         const double second = fine.*member - medium.*member;
         CHECK(std::log2(first / second) == doctest::Approx(2.0).epsilon(0.03));
-        CHECK(fine.*member + second / 3.0 == doctest::Approx(value.*member).epsilon(1.5e-7));
+        CHECK(fine.*member + second / 3.0 == doctest::Approx(at.value.*member).epsilon(1.5e-7));
       }
     }
   }
@@ -81,15 +82,14 @@ TEST_SUITE("first principles: developed ducts") {
     struct row {
       double aspect, fanning_re, uniform_flux, uniform_temperature;
     };
-    for (const auto& [aspect, fanning_re, uniform_flux, uniform_temperature] :
-         {row{1.0, 14.227, 3.608, 2.976}, row{0.5, 15.548, 4.123, 3.391},
-          row{1.0 / 3.0, 17.090, 4.795, 3.956}, row{0.25, 18.233, 5.331, 4.439},
-          row{0.125, 20.585, 6.490, 5.597}}) {
-      CAPTURE(aspect);
-      const auto flow = rectangular_duct(aspect);
-      CHECK(flow.fanning_re == doctest::Approx(fanning_re).epsilon(5e-5));
-      CHECK(flow.uniform_flux == doctest::Approx(uniform_flux).epsilon(1.5e-4));
-      CHECK(flow.uniform_temperature == doctest::Approx(uniform_temperature).epsilon(1e-3));
+    for (const auto& at : {row{1.0, 14.227, 3.608, 2.976}, row{0.5, 15.548, 4.123, 3.391},
+                           row{1.0 / 3.0, 17.090, 4.795, 3.956}, row{0.25, 18.233, 5.331, 4.439},
+                           row{0.125, 20.585, 6.490, 5.597}}) {
+      CAPTURE(at.aspect);
+      const auto flow = rectangular_duct(at.aspect);
+      CHECK(flow.fanning_re == doctest::Approx(at.fanning_re).epsilon(5e-5));
+      CHECK(flow.uniform_flux == doctest::Approx(at.uniform_flux).epsilon(1.5e-4));
+      CHECK(flow.uniform_temperature == doctest::Approx(at.uniform_temperature).epsilon(1e-3));
     }
   }
 

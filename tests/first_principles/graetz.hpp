@@ -25,8 +25,8 @@ class thermal_entry {
     const bool tube = shape == duct::round_tube;
     const Eigen::Index step = tube ? 1 : 2;  // between plates only the even half is needed
     const auto rule = gauss_legendre(step * modes + 4);
-    const Eigen::VectorXd point = tube ? Eigen::VectorXd((rule.node.array() + 1.0) / 2.0)
-                                       : rule.node;
+    const Eigen::VectorXd point =
+        tube ? Eigen::VectorXd((rule.node.array() + 1.0) / 2.0) : rule.node;
     const auto table = legendre_table(step * (modes + 1), rule.node);
     // tube: ds = dxi/2 and d/ds = 2 d/dxi; plates: the half channel is half of the integral
     const Eigen::ArrayXd profile =
@@ -49,8 +49,10 @@ class thermal_entry {
       value.col(k) = table.value.col(step * k);
       slope.col(k) = table.slope.col(step * k);
       at_wall[k] = norm;
-      pinned_value.col(k) = table.value.col(step * k) - norm / next * table.value.col(step * (k + 1));
-      pinned_slope.col(k) = table.slope.col(step * k) - norm / next * table.slope.col(step * (k + 1));
+      pinned_value.col(k) =
+          table.value.col(step * k) - norm / next * table.value.col(step * (k + 1));
+      pinned_slope.col(k) =
+          table.slope.col(step * k) - norm / next * table.slope.col(step * (k + 1));
     }
     const auto weighted = [](const Eigen::MatrixXd& a, const Eigen::VectorXd& w) {
       return Eigen::MatrixXd(a.transpose() * w.asDiagonal() * a);
@@ -58,16 +60,14 @@ class thermal_entry {
     const auto temperature =
         solve_modes(weighted(pinned_slope, stiff_weight), weighted(pinned_value, mass_weight));
     temperature_rate_ = temperature.value.array();
-    temperature_share_ =
-        (temperature.vector.transpose() * (pinned_value.transpose() * mass_weight))
-            .array()
-            .square() /
-        flow_;
+    temperature_share_ = (temperature.vector.transpose() * (pinned_value.transpose() * mass_weight))
+                             .array()
+                             .square() /
+                         flow_;
     const auto flux = solve_modes(weighted(slope, stiff_weight), weighted(value, mass_weight));
     // the first flux mode is the uniform temperature, which the bulk carries
     flux_rate_ = flux.value.tail(modes - 1).array();
-    flux_share_ =
-        (flux.vector.transpose() * at_wall).tail(modes - 1).array().square() / flux_rate_;
+    flux_share_ = (flux.vector.transpose() * at_wall).tail(modes - 1).array().square() / flux_rate_;
   }
 
   /// lambda_n of exp(-lambda_n^2 X)
@@ -90,8 +90,8 @@ class thermal_entry {
     return -std::log(bulk_excess(x_star)) / (4.0 * x_star);
   }
   double uniform_flux_local(double x_star) const {
-    const Eigen::ArrayXd grown = -(-flux_rate_ * scale() * x_star).unaryExpr(
-        [](double e) { return std::expm1(e); });
+    const Eigen::ArrayXd grown =
+        -(-flux_rate_ * scale() * x_star).unaryExpr([](double e) { return std::expm1(e); });
     return (shape_ == duct::round_tube ? 2.0 : 4.0) / (flux_share_ * grown).sum();
   }
   /// mean of the local film coefficient. Next to the inlet Nu_x = leveque x_star^(-1/3) + constant,
@@ -109,8 +109,8 @@ class thermal_entry {
     return sum / x_star;
   }
 
-  /// M. A. Leveque, Ann. Mines 13 (1928): Nu_x x_star^(1/3) next to the inlet, from the wall slope of
-  /// the velocity: 8 u_m/D in the tube, 12 u_m/D_h between plates.
+  /// M. A. Leveque, Ann. Mines 13 (1928): Nu_x x_star^(1/3) next to the inlet, from the wall slope
+  /// of the velocity: 8 u_m/D in the tube, 12 u_m/D_h between plates.
   double uniform_temperature_leveque() const {
     return std::cbrt(wall_slope() / 9.0) / std::tgamma(4.0 / 3.0);
   }
@@ -126,7 +126,9 @@ class thermal_entry {
  private:
   double wall_slope() const { return shape_ == duct::round_tube ? 8.0 : 12.0; }
   double scale() const { return shape_ == duct::round_tube ? 2.0 : 32.0 / 3.0; }
-  Eigen::ArrayXd decay(double x_star) const { return (-temperature_rate_ * scale() * x_star).exp(); }
+  Eigen::ArrayXd decay(double x_star) const {
+    return (-temperature_rate_ * scale() * x_star).exp();
+  }
 
   duct shape_;
   double flow_ = 0.0;

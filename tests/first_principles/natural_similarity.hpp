@@ -6,9 +6,9 @@
 //   isoflux wall, eta = (y/x) (Gr*_x/5)^(1/5)
 //     f''' + 4 f f'' - 3 f'^2 + th = 0,  th'' + Pr (4 f th' - f' th) = 0,  th'(0) = -1
 // f(0) = f'(0) = 0, f'(inf) = th(inf) = 0. E. Pohlhausen in E. Schmidt and W. Beckmann, Tech. Mech.
-// Thermodyn. 1 (1930); S. Ostrach, NACA Rep. 1111 (1953); E. M. Sparrow, J. L. Gregg, Trans. ASME 78
-// (1956) 435-440.
-// Chebyshev collocation on a half line mapped to (-1, 1), Newton iteration, and steps in Pr from 1.
+// Thermodyn. 1 (1930); S. Ostrach, NACA Rep. 1111 (1953); E. M. Sparrow, J. L. Gregg, Trans. ASME
+// 78 (1956) 435-440. Chebyshev collocation on a half line mapped to (-1, 1), Newton iteration, and
+// steps in Pr from 1.
 
 #include <Eigen/LU>
 #include <cmath>
@@ -67,8 +67,8 @@ class plume {
       Eigen::VectorXd rest(2 * n);
       rest.head(n) = viscous * (third_ * f) +
                      inertial * (m * f.cwiseProduct(ddf) - (m - 1.0) * df.cwiseProduct(df)) + th;
-      rest.tail(n) = second_ * th +
-                     diffusive * (m * f.cwiseProduct(dth) - (m - 3.0) * df.cwiseProduct(th));
+      rest.tail(n) =
+          second_ * th + diffusive * (m * f.cwiseProduct(dth) - (m - 3.0) * df.cwiseProduct(th));
       slope.topLeftCorner(n, n) =
           viscous * third_ + inertial * (m * (f.asDiagonal() * second_) -
                                          2.0 * (m - 1.0) * (df.asDiagonal() * first_));

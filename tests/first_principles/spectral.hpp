@@ -26,8 +26,7 @@ inline quadrature_rule gauss_legendre(Eigen::Index n) {
       double here = x;
       for (Eigen::Index k = 2; k <= n; ++k) {
         const double degree = static_cast<double>(k);
-        const double next =
-            ((2.0 * degree - 1.0) * x * here - (degree - 1.0) * before) / degree;
+        const double next = ((2.0 * degree - 1.0) * x * here - (degree - 1.0) * before) / degree;
         before = here;
         here = next;
       }
@@ -49,10 +48,10 @@ struct basis_table {
 inline basis_table legendre_table(Eigen::Index degrees, const Eigen::VectorXd& x) {
   basis_table table{Eigen::MatrixXd(x.size(), degrees), Eigen::MatrixXd(x.size(), degrees)};
   for (Eigen::Index i = 0; i < x.size(); ++i) {
-    double p = 1.0;       // P_k
-    double p_next = x[i]; // P_(k+1)
-    double d = 0.0;       // P_k'
-    double d_next = 1.0;  // P_(k+1)'
+    double p = 1.0;        // P_k
+    double p_next = x[i];  // P_(k+1)
+    double d = 0.0;        // P_k'
+    double d_next = 1.0;   // P_(k+1)'
     for (Eigen::Index k = 0; k < degrees; ++k) {
       const double degree = static_cast<double>(k);
       const double norm = std::sqrt(2.0 * degree + 1.0);

@@ -1,8 +1,8 @@
 #pragma once
 
-// K v = mu M v for symmetric K and positive definite M of moderate size: Cholesky, then cyclic Jacobi
-// rotations (G. H. Golub, C. F. Van Loan, Matrix Computations, ch. 8). Jacobi keeps the small
-// eigenvalues accurate, and compiles in a fraction of the time of a blocked solver.
+// K v = mu M v for symmetric K and positive definite M of moderate size: Cholesky, then cyclic
+// Jacobi rotations (G. H. Golub, C. F. Van Loan, Matrix Computations, ch. 8). Jacobi keeps the
+// small eigenvalues accurate, and compiles in a fraction of the time of a blocked solver.
 
 #include <Eigen/Core>
 #include <algorithm>

@@ -78,8 +78,8 @@ inline double taylor_couette_marginal(double radius_ratio, double k, Eigen::Inde
   divergence.diagonal() += (1.0 / r).matrix();
   Eigen::MatrixXd L = d * divergence;
   L.diagonal().array() -= k * k;
-  const double value = detail::largest_eigenvalue(
-      grid, L * L, 2.0 * k * k * turning, L, Eigen::VectorXd::Constant(r.size(), 2.0 * A));
+  const double value = detail::largest_eigenvalue(grid, L * L, 2.0 * k * k * turning, L,
+                                                  Eigen::VectorXd::Constant(r.size(), 2.0 * A));
   return 1.0 / std::sqrt(value);
 }
 
@@ -89,14 +89,13 @@ inline onset taylor_couette(double radius_ratio, Eigen::Index points = 24) {
 }
 
 /// Narrow gap, angular velocity falling linearly from omega at the inner to `outer` omega at the
-/// outer wall. The group is (1 - outer^2) omega^2 R b^3/nu^2, that is the mean angular velocity times
-/// the difference: outer = 0 is the outer cylinder at rest, outer -> 1 has the critical number of a
-/// fluid layer heated from below.
+/// outer wall. The group is (1 - outer^2) omega^2 R b^3/nu^2, that is the mean angular velocity
+/// times the difference: outer = 0 is the outer cylinder at rest, outer -> 1 has the critical
+/// number of a fluid layer heated from below.
 inline onset narrow_gap(double outer, Eigen::Index points = 24) {
   const auto grid = chebyshev(points);
   const Eigen::MatrixXd d = 2.0 * grid.derive;
-  const Eigen::VectorXd turning =
-      (1.0 - (1.0 - outer) * 0.5 * (1.0 + grid.node.array())).matrix();
+  const Eigen::VectorXd turning = (1.0 - (1.0 - outer) * 0.5 * (1.0 + grid.node.array())).matrix();
   return detail::least_over_wave_number(
       [&](double k) {
         Eigen::MatrixXd L = d * d;

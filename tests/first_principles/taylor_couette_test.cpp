@@ -1,10 +1,11 @@
 // Onset of Taylor vortices: the solver against published critical numbers, then what the library
-// says about the onset against the solver.
+// says about the onset against the solver. (Minimises with boost/math, which needs exceptions.)
 
 #include "taylor_couette.hpp"
 
-#include <cmath>
 #include <doctest/doctest.h>
+
+#include <cmath>
 #include <initializer_list>
 
 #include "convelope/correlations/external/annular_gap.hpp"
@@ -18,8 +19,8 @@ using first_principles::taylor_couette;
 
 TEST_SUITE("first principles: Taylor vortices") {
   TEST_CASE("narrow gap") {
-    // S. Chandrasekhar, Hydrodynamic and Hydromagnetic Stability, Oxford 1961, ch. VII: T = 3390 for
-    // the outer cylinder at rest, T being twice this group, wave number 3.12 (from memory)
+    // S. Chandrasekhar, Hydrodynamic and Hydromagnetic Stability, Oxford 1961, ch. VII: T = 3390
+    // for the outer cylinder at rest, T being twice this group, wave number 3.12 (from memory)
     const auto still = narrow_gap(0.0);
     CHECK(still.critical == doctest::Approx(1694.95).epsilon(1e-6));
     CHECK(2.0 * still.critical == doctest::Approx(3390.0).epsilon(2e-4));
@@ -32,19 +33,21 @@ TEST_SUITE("first principles: Taylor vortices") {
   }
 
   TEST_CASE("finite gap, outer cylinder at rest") {
-    // R. C. DiPrima, P. M. Eagles, B. S. Ng, Phys. Fluids 27 (1984) 2403-2411 (from memory)
+    // R. C. DiPrima, H. L. Swinney, in Hydrodynamic Instabilities and the Transition to Turbulence,
+    // Springer 1981, ch. 6 (from memory), to their digits
     struct row {
       double ratio, reynolds, wave_number;
     };
-    for (const auto& [ratio, reynolds, wave_number] :
-         {row{0.5, 68.186, 3.162}, row{0.6, 71.715, 3.148}, row{0.7, 79.490, 3.139},
-          row{0.8, 94.734, 3.133}, row{0.9, 131.61, 3.129}, row{0.95, 184.99, 3.128}}) {
-      CAPTURE(ratio);
-      const auto critical = taylor_couette(ratio);
-      CHECK(critical.critical == doctest::Approx(reynolds).epsilon(5e-5));
-      CHECK(critical.wave_number == doctest::Approx(wave_number).epsilon(3e-4));
+    for (const auto& at :
+         {row{0.5, 68.19, 3.16}, row{0.6, 71.72, 3.15}, row{0.7, 79.49, 3.14},
+          row{0.8, 94.73, 3.13}, row{0.9, 131.61, 3.13}, row{0.95, 184.99, 3.13}}) {
+      CAPTURE(at.ratio);
+      const auto critical = taylor_couette(at.ratio);
+      CHECK(critical.critical == doctest::Approx(at.reynolds).epsilon(8e-5));
+      CHECK(critical.wave_number == doctest::Approx(at.wave_number).epsilon(1.2e-3));
     }
-    // Chandrasekhar 1961, ch. VII: T = (64/9)(omega R_i^2/nu)^2 = 3.310e4 at R_o = 2 R_i (from memory)
+    // Chandrasekhar 1961, ch. VII: T = (64/9)(omega R_i^2/nu)^2 = 3.310e4 at R_o = 2 R_i (from
+    // memory)
     const double re = taylor_couette(0.5).critical;
     CHECK(64.0 / 9.0 * re * re == doctest::Approx(3.310e4).epsilon(2e-3));
   }
@@ -73,6 +76,11 @@ TEST_SUITE("first principles: Taylor vortices") {
     CHECK(gap::taylor_gazley::formula(1.005 * plain, 0.71) != 2.0);
     CHECK(gap::becker_kaye_1962::formula(0.995 * squared) == 2.0);
     CHECK(gap::becker_kaye_1962::formula(1.005 * squared) != 2.0);
+    // At the onset the vortices carry nothing yet, so that Nu = 2 there; the published laws start a
+    // little below it.
+    const auto start = [](double Nu) { return deviations({Nu}, [](double v) { return v / 2.0; }); };
+    check_band(start(gap::taylor_gazley::formula(1.005 * plain, 0.71)), -3.90, -3.90);
+    check_band(start(gap::becker_kaye_1962::formula(1.005 * squared)), -1.81, -1.81);
   }
 
   TEST_CASE("library: geometry factor of a gap that is not narrow") {
@@ -84,8 +92,8 @@ TEST_SUITE("first principles: Taylor vortices") {
       const double onset = re * re * mean_radius * width / (radius_ratio * radius_ratio);
       return 1697.0 * gap::becker_kaye_geometry_factor::formula(width / mean_radius) / onset;
     };
-    check_band(deviations({0.7, 0.8, 0.9, 0.95, 0.99}, ratio), {-0.42, -0.34}, {4.15, 4.23});
-    check_band(deviations({0.5}, ratio), {46.2, 46.4}, {46.2, 46.4});  // outside its range
+    check_band(deviations({0.7, 0.8, 0.9, 0.95, 0.99}, ratio), -0.38, 4.19);
+    check_band(deviations({0.5}, ratio), 46.31, 46.31);  // outside its range
   }
 
   TEST_CASE("library: conduction through a gap of any width") {
@@ -99,10 +107,10 @@ TEST_SUITE("first principles: Taylor vortices") {
       }
       return 2.0 * (1.0 - radius_ratio) / (radius_ratio * resistance);
     };
-    for (const double radius_ratio : {0.3, 0.5, 0.7, 0.9, 0.99, 0.9995}) {
+    for (const double radius_ratio : {0.3, 0.5, 0.7, 0.9, 0.99, 0.99901}) {
       CAPTURE(radius_ratio);
       CHECK(gap::conduction_limit::formula(radius_ratio) ==
-            doctest::Approx(exact(radius_ratio)).epsilon(1e-11));
+            doctest::Approx(exact(radius_ratio)).epsilon(2e-13));
     }
   }
 }

@@ -120,8 +120,8 @@ class vertical_channel {
       // steps fine at the inlet, and one of them ends at mid height
       const double s = static_cast<double>(i) / static_cast<double>(steps_);
       const double split = 0.75;
-      const double x_new = s <= split ? 0.5 * std::pow(s / split, 3)
-                                      : 0.5 + 0.5 * (s - split) / (1.0 - split);
+      const double x_new =
+          s <= split ? 0.5 * std::pow(s / split, 3) : 0.5 + 0.5 * (s - split) / (1.0 - split);
       const double step = x_new - x;
       const Eigen::ArrayXd th_old = th;
       const Eigen::ArrayXd u_old = u;
@@ -142,7 +142,8 @@ class vertical_channel {
           right[cells_ - 1] += 1.0;
           if (both) right[0] += 1.0;
         }
-        th = tridiagonal(elenbaas / step * u * width_, cross, right, isothermal && both, isothermal);
+        th =
+            tridiagonal(elenbaas / step * u * width_, cross, right, isothermal && both, isothermal);
       }
       pressure += 0.5 * (gradient + gradient_new) * step;
       gradient = gradient_new;
@@ -151,9 +152,8 @@ class vertical_channel {
         result.mid_height = 1.0 / (th[cells_ - 1] + 1.0 / link_[cells_]);
       }
     }
-    result.nusselt = isothermal
-                         ? elenbaas * (u * th * width_).sum() / (both ? 2.0 : 1.0)
-                         : 1.0 / (th[cells_ - 1] + 1.0 / link_[cells_]);
+    result.nusselt = isothermal ? elenbaas * (u * th * width_).sum() / (both ? 2.0 : 1.0)
+                                : 1.0 / (th[cells_ - 1] + 1.0 / link_[cells_]);
     return pressure;
   }
 
@@ -172,8 +172,8 @@ inline double filled_channel(double ratio) {
   const auto integral = [&rule](const auto& f, double from, double to) {
     double sum = 0.0;
     for (Eigen::Index i = 0; i < rule.node.size(); ++i) {
-      sum += 0.5 * (to - from) * rule.weight[i] *
-             f(from + 0.5 * (to - from) * (1.0 + rule.node[i]));
+      sum +=
+          0.5 * (to - from) * rule.weight[i] * f(from + 0.5 * (to - from) * (1.0 + rule.node[i]));
     }
     return sum;
   };

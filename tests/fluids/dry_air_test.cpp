@@ -54,13 +54,15 @@ TEST_CASE("dry air: what is not finite is flagged and never crashes") {
     CHECK_FALSE(seen(300.0, bad).finite_input());
     CHECK(seen(300.0, bad).fluid_outside());
     CHECK_FALSE(seen(300.0, bad).fluid_crossed(0, side::below));
+    if (zero_divisor_stops) continue;
     (void)dry_air{}.values(bad, 1e5);
     (void)dry_air_fast{}.values(bad, 1e5);
   }
-  for (const double T : {-300.0, -1e-300, 0.0, 1e-300, 1e300}) {
+  for (const double T : {-600.0, -300.0, -1e-300, 0.0, 1e-300, 1e300}) {
+    CHECK_FALSE(seen(T, 1e5).inside());
+    if (zero_divisor_stops) continue;
     (void)dry_air{}.values(T, 1e5);
     (void)dry_air_fast{}.values(T, 1e5);
-    CHECK_FALSE(seen(T, 1e5).inside());
   }
 }
 

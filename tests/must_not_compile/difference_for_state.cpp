@@ -1,4 +1,4 @@
-// names: temperature_difference, temperature_kind
+// names: temperature_difference, is_point
 #include "convelope/fluids/constant_properties.hpp"
 
 using namespace convelope;

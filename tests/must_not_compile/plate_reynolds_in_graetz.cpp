@@ -1,4 +1,4 @@
-// names: measures_a_duct_reynolds, plate_length
+// names: is_duct_reynolds, plate_length
 #include "convelope/groups/forced.hpp"
 
 using namespace convelope;

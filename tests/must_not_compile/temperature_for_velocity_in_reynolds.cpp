@@ -1,4 +1,4 @@
-// names: measures_a_velocity, wall_temperature
+// names: velocity, wall_temperature
 #include "convelope/groups/forced.hpp"
 
 using namespace convelope;

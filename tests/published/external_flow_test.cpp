@@ -3,6 +3,8 @@
 
 #include <doctest/doctest.h>
 
+#include <cmath>
+
 #include "convelope/correlations/external/cylinder_crossflow.hpp"
 #include "convelope/correlations/external/flat_plate.hpp"
 #include "convelope/correlations/external/sphere.hpp"
@@ -56,7 +58,7 @@ TEST_SUITE("published: external flow") {
     const auto h1 = film_coefficient(
         flat_plate::laminar_isothermal_average{}(air.reynolds_on(first), air.prandtl()),
         air.conductivity_of(), first);
-    CHECK(h1.si() == near(134.0, 2e-3));
+    CHECK(h1.si() == near(134.0, 3e-3));
     CHECK(h1.si() * 0.05 * 205.0 == near(1370.0, 3e-3));  // W
 
     // the sixth: what leaves six strips less what leaves five
@@ -137,8 +139,8 @@ TEST_SUITE("published: external flow") {
     CHECK(Nu.inside());
     CHECK(Nu.si() == near(124.0, 4e-3));
     const auto h = film_coefficient(Nu, air.conductivity_of(), D);
-    CHECK(h.si() == near(34.8, 4e-3));
-    CHECK(h.si() * 3.14159265 * 0.1 * 100.0 == near(1093.0, 4e-3));  // W
+    CHECK(h.si() == near(34.8, 5e-3));
+    CHECK(h.si() * 3.14159265 * 0.1 * 100.0 == near(1093.0, 5e-3));  // W
   }
 
   TEST_CASE("Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, 5th ed., example 7.6") {

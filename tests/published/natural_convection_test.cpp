@@ -38,8 +38,8 @@ TEST_SUITE("published: natural convection") {
     const air a{26.4e-6, 38.3e-6, 33.8e-3, 0.0025, 0.690};
     const double Ra = rayleigh_number(9.8, a, 209.0, 0.71);
     CHECK(Ra == near(1.813e9, 1e-3));
-    const auto Nu = vertical_plate::churchill_chu_1975{}(rayleigh_of<height>(Ra),
-                                                         prandtl_number(a.Pr));
+    const auto Nu =
+        vertical_plate::churchill_chu_1975{}(rayleigh_of<height>(Ra), prandtl_number(a.Pr));
     CHECK(Nu.inside());
     CHECK(Nu.si() == near(147.0, 2e-3));
     const auto h = film_coefficient(Nu, conductivity_of(a), height(0.71 * metre));
@@ -65,8 +65,8 @@ TEST_SUITE("published: natural convection") {
                                         conductivity_of(a), length);
     CHECK(h_top.inside());
     CHECK(h_top.si() == near(5.47, 3e-3));
-    const auto h_bottom = film_coefficient(horizontal_plate_down::mcadams_1954{}(Ra),
-                                           conductivity_of(a), length);
+    const auto h_bottom =
+        film_coefficient(horizontal_plate_down::mcadams_1954{}(Ra), conductivity_of(a), length);
     CHECK(h_bottom.inside());
     CHECK(h_bottom.si() == near(2.07, 3e-3));
     CHECK((2.0 * 0.3 * h_side.si() + 0.75 * (h_top.si() + h_bottom.si())) * 30.0 ==
@@ -78,8 +78,8 @@ TEST_SUITE("published: natural convection") {
     const air a{16.5e-6, 16.5e-6 / 0.7, 0.02685, 3.25e-3, 0.7};
     const double Ra = rayleigh_number(9.8, a, 50.0, 4.0);
     CHECK(Ra == near(2.62e11, 1e-3));
-    const auto Nu = vertical_plate::churchill_chu_1975{}(rayleigh_of<height>(Ra),
-                                                         prandtl_number(a.Pr));
+    const auto Nu =
+        vertical_plate::churchill_chu_1975{}(rayleigh_of<height>(Ra), prandtl_number(a.Pr));
     CHECK(Nu.inside());
     CHECK(std::sqrt(Nu.si()) == near(26.75, 1e-3));
     const auto h = film_coefficient(Nu, conductivity_of(a), height(4.0 * metre));
@@ -92,8 +92,8 @@ TEST_SUITE("published: natural convection") {
     const air a{1.750e-5, 1.750e-5 / 0.7241, 0.02699, 1.0 / 318.0, 0.7241};
     const double Ra = rayleigh_number(9.81, a, 50.0, 0.08);
     CHECK(Ra == near(1.867e6, 1e-3));
-    const auto Nu = horizontal_cylinder::churchill_chu_1975{}(rayleigh_of<diameter>(Ra),
-                                                              prandtl_number(a.Pr));
+    const auto Nu =
+        horizontal_cylinder::churchill_chu_1975{}(rayleigh_of<diameter>(Ra), prandtl_number(a.Pr));
     CHECK(Nu.inside());
     CHECK(Nu.si() == near(17.39, 1e-3));
     const auto h = film_coefficient(Nu, conductivity_of(a), diameter(0.08 * metre));
@@ -106,8 +106,8 @@ TEST_SUITE("published: natural convection") {
     const air a{1.896e-5, 1.896e-5 / 0.7202, 0.02808, 1.0 / 333.0, 0.7202};
     const double Ra = rayleigh_number(9.81, a, 60.0, 0.6);
     CHECK(Ra == near(7.649e8, 1e-3));
-    const auto standing = vertical_plate::churchill_chu_1975{}(rayleigh_of<height>(Ra),
-                                                               prandtl_number(a.Pr));
+    const auto standing =
+        vertical_plate::churchill_chu_1975{}(rayleigh_of<height>(Ra), prandtl_number(a.Pr));
     CHECK(standing.si() == near(113.4, 1e-3));
     const auto h = film_coefficient(standing, conductivity_of(a), height(0.6 * metre));
     CHECK(h.si() * 0.36 * 60.0 == near(115.0, 5e-3));  // W

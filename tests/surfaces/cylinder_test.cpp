@@ -21,6 +21,7 @@ TEST_CASE("cylinder: no step anywhere, right sign, exact slope") {
   everywhere(13, any_cylinder, liquid_water{}, water_range, 10.0, 4);
   everywhere(14, any_cylinder, oil(), any_range, 10.0, 4);
   everywhere(15, any_cylinder, mercury(), any_range, 10.0, 4);
+  everywhere(16, any_cylinder, liquid_water{}, cold_water_range, 1.0);
 }
 
 TEST_CASE("cylinder: no step over its diameter") {

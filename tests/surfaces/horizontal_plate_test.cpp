@@ -29,6 +29,7 @@ TEST_CASE("horizontal wall: no step anywhere, right sign, exact slope") {
   everywhere(53, any_plate<facing::up>, dry_air_fast{}, air_range, 100.0, 4);
   everywhere(54, any_plate<facing::up>, liquid_water{}, water_range, 10.0, 4);
   everywhere(55, any_plate<facing::down>, oil(), any_range, 10.0, 4);
+  everywhere(56, any_plate<facing::up>, liquid_water{}, cold_water_range, 1.0);
 }
 
 TEST_CASE("horizontal wall: no step over its size") {

@@ -21,6 +21,7 @@ TEST_CASE("sphere: no step anywhere, right sign, exact slope") {
   everywhere(23, any_sphere, liquid_water{}, water_range, 10.0, 4);
   everywhere(24, any_sphere, oil(), any_range, 10.0, 4);
   everywhere(25, any_sphere, mercury(), any_range, 10.0, 4);
+  everywhere(26, any_sphere, liquid_water{}, cold_water_range, 1.0);
 }
 
 TEST_CASE("sphere: no step over its diameter") {

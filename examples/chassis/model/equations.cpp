@@ -69,27 +69,26 @@ balances equations::at(const Eigen::VectorXd& x, wall_derivatives derivatives) c
 }
 
 double equations::size_of(const Eigen::VectorXd& residual) const {
-  double heat = 0;
+  double worst = 0;    // heat of one row
+  double balance = 0;  // of all rows: heat in less heat out
   double air = 0;
   double pressure = 0;
-  for (std::size_t b = 0; b < layout_.boards.size(); ++b) {
-    const auto first = layout_.middle(b, 0);
-    const auto count = 3 * static_cast<Eigen::Index>(layout_.boards[b].mesh.cells());
-    heat += residual.segment(first, count).lpNorm<1>();
-  }
+  const auto heat = [&](int row) {
+    worst = (std::max)(worst, std::abs(residual[row]));
+    balance += residual[row];
+  };
+  for (int row = 0; row < layout_.mean(0, 0); ++row) heat(row);
   for (std::size_t p = 0; p < layout_.passages.size(); ++p) {
     for (std::size_t s = 0; s < layout_.passages[p].size(); ++s) {
       air = (std::max)(air, std::abs(residual[layout_.mean(p, s)]));
-      heat += std::abs(residual[layout_.outgoing(p, s)]);
+      heat(layout_.outgoing(p, s));
     }
     pressure = (std::max)(pressure, std::abs(residual[layout_.flow(p)]));
   }
   pressure = (std::max)(pressure, std::abs(residual[layout_.stack_pressure()]));
-  heat += std::abs(residual[layout_.plenum()]);
-  for (std::size_t w = 0; w < case_.outer_walls.size(); ++w) {
-    heat += std::abs(residual[layout_.outer_wall(w)]);
-  }
-  const double size = (std::max)({heat, air, pressure});
+  heat(layout_.plenum());
+  for (std::size_t w = 0; w < case_.outer_walls.size(); ++w) heat(layout_.outer_wall(w));
+  const double size = (std::max)({worst, std::abs(balance), air, pressure});
   return size == size ? size : (std::numeric_limits<double>::max)();
 }
 

@@ -25,8 +25,8 @@ class equations {
 
   balances at(const Eigen::VectorXd& x, wall_derivatives derivatives) const;
 
-  /// The largest of: sum of heat residuals over total power, air temperature residual in K,
-  /// pressure residual over the reference pressure.
+  /// The largest of: heat residual of one balance and the sum of them all, over the total power;
+  /// air temperature residual in K; pressure residual over the reference pressure.
   double size_of(const Eigen::VectorXd& residual) const;
 
   film contact_film(const Eigen::VectorXd& x, std::size_t contact) const;

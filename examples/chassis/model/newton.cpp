@@ -32,6 +32,8 @@ double safe_fraction(const equations& system, const Eigen::VectorXd& x,
 newton_result solve(const equations& system, Eigen::VectorXd start, wall_derivatives derivatives,
                     const progress_report& report) {
   constexpr int most_halvings = 6;
+  constexpr int most_vain_steps = 5;
+  int vain_steps = 0;  // in a row, that did not bring the residual down
   const auto& settings = system.of().solver;
   newton_result result;
   result.x = std::move(start);
@@ -42,7 +44,8 @@ newton_result solve(const equations& system, Eigen::VectorXd start, wall_derivat
   Eigen::SparseMatrix<double> jacobian(system.places().unknowns(), system.places().unknowns());
   Eigen::SparseLU<Eigen::SparseMatrix<double>> lu;
   bool analysed = false;
-  while (!(result.residual <= settings.tolerance) && result.iterations < settings.max_iterations) {
+  while (!(result.residual <= settings.tolerance) && result.iterations < settings.max_iterations &&
+         vain_steps < most_vain_steps) {
     jacobian.setFromTriplets(sum.slopes.begin(), sum.slopes.end());
     if (!analysed) lu.analyzePattern(jacobian);  // the pattern never changes
     analysed = true;
@@ -57,6 +60,7 @@ newton_result solve(const equations& system, Eigen::VectorXd start, wall_derivat
       const Eigen::VectorXd x = result.x + fraction * step;
       auto next = system.at(x, derivatives);
       if (next.residual.norm() < before || halving == most_halvings) {
+        vain_steps = next.residual.norm() < before ? 0 : vain_steps + 1;
         result.x = x;
         sum = std::move(next);
         break;

@@ -27,7 +27,9 @@ class table {
       std::string line = " ";
       for (std::size_t i = 0; i < row.size(); ++i) {
         const std::string pad(width[i] - row[i].size(), ' ');
-        line += " " + (i < left_columns ? row[i] + pad : pad + row[i]) + " ";
+        // Appended piece by piece: g++ 12 warns falsely of literal + temporary string.
+        line.append(" ").append(i < left_columns ? row[i] : pad);
+        line.append(i < left_columns ? pad : row[i]).append(" ");
       }
       line.erase(line.find_last_not_of(' ') + 1);
       out << line << "\n";

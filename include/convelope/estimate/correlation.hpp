@@ -84,14 +84,15 @@ CONVELOPE_FUNCTION constexpr X clamped(const Envelope& envelope, const X& x) {
     X y = x;
     std::apply(
         [&](const auto&... l) {
-          ((y = [&] {
-             if constexpr (std::remove_cvref_t<decltype(l)>::template bounds<K>) {
-               return math::smaller(math::larger(y, scalar_adaptor<X>::constant(l.low)),
-                          scalar_adaptor<X>::constant(l.high));
-             } else {
-               return y;
-             }
-           }()),
+          ((y =
+                [&] {
+                  if constexpr (std::remove_cvref_t<decltype(l)>::template bounds<K>) {
+                    return math::smaller(math::larger(y, scalar_adaptor<X>::constant(l.low)),
+                                         scalar_adaptor<X>::constant(l.high));
+                  } else {
+                    return y;
+                  }
+                }()),
            ...);
         },
         envelope.limits);
@@ -126,14 +127,6 @@ constexpr const char* const* choices_of() {
   }
 }
 
-constexpr bool same_text(const char* a, const char* b) {
-  while (*a != 0 && *a == *b) {
-    ++a;
-    ++b;
-  }
-  return *a == *b;
-}
-
 /// A correlation's inputs as data: keys from its own list if it has one, else from the kinds.
 template <class C>
 inline constexpr auto input_table = C::with_input_kinds([]<class... K>() {
@@ -163,16 +156,9 @@ inline constexpr auto limit_table = std::apply(
     C::envelope.limits);
 
 template <class C>
-inline constexpr correlation_info record_of{C::id,
-                                            C::quantity,
-                                            C::result_kind::words,
-                                            &C::source,
-                                            input_table<C>.data(),
-                                            C::input_count,
-                                            limit_table<C>.data(),
-                                            C::envelope.count,
-                                            C::scatter,
-                                            C::state_at};
+inline constexpr correlation_info record_of{
+    C::id,          C::quantity,           C::result_kind::words, &C::source, input_table<C>.data(),
+    C::input_count, limit_table<C>.data(), C::envelope.count,     C::scatter, C::state_at};
 }  // namespace detail
 
 /// Base of every correlation: `struct name : correlation<name, Result, Inputs...>`, where Result
@@ -221,8 +207,10 @@ struct correlation_on : formula_functions {
   template <class Policy>
   CONVELOPE_FUNCTION constexpr auto under(const Policy& how) const {
     return [how]<class... In>(const In&... in)
-             requires(stands_for<In, Inputs> && ...)
-    { return evaluate(how, in...); };
+      requires(stands_for<In, Inputs> && ...)
+    {
+      return evaluate(how, in...);
+    };
   }
 
   /// Calls f.template operator()<Kind...>() with the input kinds: for the catalogue.
@@ -240,8 +228,7 @@ struct correlation_on : formula_functions {
     using P = plain_t<T>;
     using bits = bits_t<T>;
 
-    bits seen = Self::envelope.template check<T, Inputs...>(
-        detail::tested<T, Inputs>(in)...);
+    bits seen = Self::envelope.template check<T, Inputs...>(detail::tested<T, Inputs>(in)...);
     ((seen = bits(seen | finite_bits<T, Inputs>(in))), ...);
     ((seen = bits(seen | inherited<T>(in))), ...);
     if (Self::scatter < 0.0) seen = bits(seen | bits(word::scatter_not_stated));
@@ -254,15 +241,15 @@ struct correlation_on : formula_functions {
       if constexpr (sizeof...(Inputs) == 0) {
         return Self::template formula<W>();
       } else if constexpr (Policy::clamps) {
-        return W(Self::formula(detail::clamped<Inputs>(
-            Self::envelope, detail::argument<W, Inputs>(in))...));
+        return W(Self::formula(
+            detail::clamped<Inputs>(Self::envelope, detail::argument<W, Inputs>(in))...));
       } else {
         return W(Self::formula(detail::argument<W, Inputs>(in)...));
       }
     }();
     const fluid_info* fluid = detail::first_given<fluid_info>(detail::fluid_from(in)...);
     return how(estimate<result_kind, T>(detail::as_result<T>(y), verdict<bits>(seen), variance,
-                                           &detail::record_of<Self>, fluid));
+                                        &detail::record_of<Self>, fluid));
   }
 
   template <class T, class K, class In>
@@ -271,20 +258,14 @@ struct correlation_on : formula_functions {
       return bits_t<T>(std::uint64_t{0});
     } else {
       using P = plain_t<T>;
-      return scalar_adaptor<P>::bits_where_not_finite(P(plain(in.si())),
-                                                      detail::word::not_finite);
+      return scalar_adaptor<P>::bits_where_not_finite(P(plain(in.si())), detail::word::not_finite);
     }
   }
   // What an input estimate brings along; its correlation slots belong to another correlation.
   template <class T, class In>
   CONVELOPE_FUNCTION static constexpr bits_t<T> inherited(const In& in) {
     if constexpr (detail::is_estimate<In>) {
-      namespace word = detail::word;
-      using bits = bits_t<T>;
-      const bits b(detail::bits_from<T>(in));
-      const bits crossed = bits(b & bits(word::correlations_mask));
-      const bits any = bits((crossed | bits(bits(std::uint64_t{0}) - crossed)) >> 63);
-      return bits((b & bits(~word::correlations_mask)) | bits(any * bits(word::input_outside)));
+      return detail::as_input_bits<T>(detail::bits_from<T>(in));
     } else {
       return bits_t<T>(std::uint64_t{0});
     }

@@ -27,10 +27,11 @@ struct limit_on_input {
 
   template <class... Ks, class... X>
   CONVELOPE_FUNCTION constexpr auto number(const X&... x) const {
-    constexpr int i = index_of_kind<K, Ks...>();
-    static_assert(i >= 0, "this limit names a kind that is not an input of the correlation");
+    constexpr int i = among<Ks...> ? index_of_kind<K, Ks...>() : 0;
     return std::get<static_cast<std::size_t>(i)>(std::tie(x...));
   }
+  template <class... Ks>
+  static constexpr bool among = index_of_kind<K, Ks...>() >= 0;
   template <class Kind>
   static constexpr bool bounds = std::is_same_v<K, Kind>;
 };
@@ -46,6 +47,8 @@ struct limit_on_group {
   CONVELOPE_FUNCTION constexpr auto number(const X&... x) const {
     return group(x...);
   }
+  template <class... Ks>
+  static constexpr bool among = true;
   template <class Kind>
   static constexpr bool bounds = false;
 };
@@ -74,6 +77,8 @@ struct envelope_of {
   /// Verdict bits (in slot 0) for inputs x of kinds Ks, as numbers of type T.
   template <class T, class... Ks, class... X>
   CONVELOPE_FUNCTION constexpr bits_t<T> check(const X&... x) const {
+    static_assert((Limits::template among<Ks...> && ...),
+                  "this limit names a kind that is not an input of the correlation");
     return check_each<T, Ks...>(std::index_sequence_for<Limits...>{}, x...);
   }
 

@@ -8,6 +8,18 @@
 namespace convelope {
 inline namespace v0 {
 
+namespace detail {
+// The bits of an answer by another correlation: what its limits say is said by `input_outside`,
+// because the slots will be read as those of the correlation that speaks.
+template <class T>
+CONVELOPE_FUNCTION constexpr bits_t<T> as_input_bits(const bits_t<T>& b) {
+  using bits = bits_t<T>;
+  const bits crossed = bits(b & bits(word::correlations_mask));
+  const bits any = bits((crossed | bits(bits(std::uint64_t{0}) - crossed)) >> 63);
+  return bits((b & bits(~word::correlations_mask)) | bits(any * bits(word::input_outside)));
+}
+}  // namespace detail
+
 /// A number of kind K together with what is known about it: its verdict, the relative scatter
 /// its sources state, which correlation gave it and which fluid it was for.
 /// Trivially copyable, no heap.
@@ -23,11 +35,7 @@ class estimate {
                                         const plain_t<T>& variance,
                                         const correlation_info* correlation,
                                         const fluid_info* fluid)
-      : si_(si),
-        variance_(variance),
-        verdict_(verdict),
-        correlation_(correlation),
-        fluid_(fluid) {}
+      : si_(si), variance_(variance), verdict_(verdict), correlation_(correlation), fluid_(fluid) {}
 
   /// The number in the kind's SI unit.
   CONVELOPE_FUNCTION constexpr const T& si() const { return si_; }
@@ -73,9 +81,12 @@ class estimate {
     const plain_t<T> x = plain(a.si_);
     const plain_t<T> y = plain(b.si_);
     const plain_t<T> s = plain(si);
-    return estimate(si, a.verdict_ | b.verdict_,
-                    plain_t<T>((x * x * a.variance_ + y * y * b.variance_) / (s * s + 1e-300)),
-                    a.correlation_ == b.correlation_ ? a.correlation_ : nullptr,
+    const bool one_source = a.correlation_ == b.correlation_;
+    const bits_t<T> seen(a.verdict_.bits() | b.verdict_.bits());
+    const plain_t<T> tiny = scalar_adaptor<plain_t<T>>::constant(1e-36);
+    return estimate(si, verdict_type(one_source ? seen : detail::as_input_bits<T>(seen)),
+                    plain_t<T>((x * x * a.variance_ + y * y * b.variance_) / (s * s + tiny)),
+                    one_source ? a.correlation_ : nullptr,
                     a.fluid_ == b.fluid_ ? a.fluid_ : nullptr);
   }
 
@@ -142,9 +153,13 @@ using number_type = common_scalar_t<typename A::value_type...>;
 template <kind K, class T, class... A>
 CONVELOPE_FUNCTION constexpr auto carried(const T& si, const A&... a) {
   if constexpr ((is_estimate<A> || ...)) {
-    return estimate<K, T>(si, verdict<bits_t<T>>(bits_t<T>((bits_from<T>(a) | ...))),
-                          plain_t<T>((variance_from<T>(a) + ...)),
-                          first_given<correlation_info>(correlation_from(a)...),
+    const correlation_info* speaks = first_given<correlation_info>(correlation_from(a)...);
+    const auto bits = [&](const auto& x) {
+      const bits_t<T> b = bits_from<T>(x);
+      return correlation_from(x) == speaks ? b : as_input_bits<T>(b);
+    };
+    return estimate<K, T>(si, verdict<bits_t<T>>(bits_t<T>((bits(a) | ...))),
+                          plain_t<T>((variance_from<T>(a) + ...)), speaks,
                           first_given<fluid_info>(fluid_from(a)...));
   } else {
     return typed<K, T>::from_si(si);

@@ -18,6 +18,10 @@ inline std::string short_number(double x) {
   return buffer;
 }
 
+inline std::string unit_text(const char* unit) {
+  return same_text(unit, "1") ? std::string() : std::string(" ") + unit;
+}
+
 inline std::string range_text(const limit_info& l) {
   if (l.low == -unbounded) return "at most " + short_number(l.high);
   if (l.high == unbounded) return "at least " + short_number(l.low);
@@ -44,16 +48,17 @@ std::string crossings(const limit_info* limits, int count, Crossed crossed) {
 /// One sentence for each thing a verdict has to say of the correlation in a slot; "" if inside.
 inline std::string explain(verdict<> v, const correlation_info& c, int slot = 0) {
   const std::string text = detail::crossings(
-      c.limits, c.limit_count,
-      [&](int i, side s) { return v.correlation_crossed(slot, i, s); });
-  return text.empty() ? text : std::string(c.id) + " is outside what it was fitted for: " + text + ".";
+      c.limits, c.limit_count, [&](int i, side s) { return v.correlation_crossed(slot, i, s); });
+  return text.empty() ? text
+                      : std::string(c.id) + " is outside what it was fitted for: " + text + ".";
 }
 
 /// The same for the fluid.
 inline std::string explain(verdict<> v, const fluid_info& f) {
-  const std::string text =
-      detail::crossings(f.limits, f.limit_count, [&](int i, side s) { return v.fluid_crossed(i, s); });
-  return text.empty() ? text : std::string(f.name) + " is outside its property range: " + text + ".";
+  const std::string text = detail::crossings(f.limits, f.limit_count,
+                                             [&](int i, side s) { return v.fluid_crossed(i, s); });
+  return text.empty() ? text
+                      : std::string(f.name) + " is outside its property range: " + text + ".";
 }
 
 /// What a person should know of an estimate, in sentences: crossings, non-finite inputs, scatter,
@@ -62,16 +67,21 @@ template <class K>
 std::string explain(const estimate<K, double>& e) {
   const verdict<> v = e.verdict();
   std::string text = std::string(K::words) + " " + K::symbol + " = " +
-                     detail::short_number(e.si()) + " " + K::unit + ".";
+                     detail::short_number(e.si()) + detail::unit_text(K::unit) + ".";
   const auto add = [&](const std::string& sentence) {
     if (!sentence.empty()) text += " " + sentence;
   };
   if (!v.finite_input()) add("An input was NaN or infinite; the value means nothing.");
   if (!v.possible_input()) {
-    add("A length or an absolute temperature was not positive and finite; the value means nothing.");
+    add("A length or an absolute temperature was not positive and finite; the value means "
+        "nothing.");
   }
   if (v.refused()) add("The value was refused.");
   if (e.correlation() != nullptr) add(explain(v, *e.correlation()));
+  if (v.correlation_outside(1) || v.correlation_outside(2) ||
+      (e.correlation() == nullptr && v.correlation_outside(0))) {
+    add("Another correlation that takes part in it is outside what it was fitted for.");
+  }
   if (e.fluid() != nullptr) add(explain(v, *e.fluid()));
   if (v.input_outside()) add("An input was itself outside the envelope it came from.");
   if (v.inside()) add("Inside every stated range.");
@@ -94,10 +104,9 @@ template <class K, class T>
   requires(scalar_adaptor<T>::lanes > 1)
 std::string explain(const estimate<K, T>& e, int lane) {
   const auto i = static_cast<std::size_t>(lane);
-  return explain(estimate<K, double>(static_cast<double>(e.si()[i]),
-                                     verdict<>(e.verdict().bits()[i]),
-                                     static_cast<double>(e.variance()[i]), e.correlation(),
-                                     e.fluid()));
+  return explain(
+      estimate<K, double>(static_cast<double>(e.si()[i]), verdict<>(e.verdict().bits()[i]),
+                          static_cast<double>(e.variance()[i]), e.correlation(), e.fluid()));
 }
 
 }  // namespace v0

@@ -4,6 +4,16 @@
 namespace convelope {
 inline namespace v0 {
 
+namespace detail {
+constexpr bool same_text(const char* a, const char* b) {
+  while (*a != 0 && *a == *b) {
+    ++a;
+    ++b;
+  }
+  return *a == *b;
+}
+}  // namespace detail
+
 /// How the constants of a formula are known here.
 enum class known : unsigned char {
   seen_in_source,  // the primary source, or an official release, was read
@@ -38,21 +48,30 @@ enum class state_rule : unsigned char {
 
 constexpr const char* words(state_rule r) {
   switch (r) {
-    case state_rule::film: return "film temperature";
-    case state_rule::bulk: return "bulk temperature";
-    case state_rule::free_stream: return "free-stream temperature";
-    case state_rule::mean_of_walls: return "mean of the two walls";
-    case state_rule::none: break;
+    case state_rule::film:
+      return "film temperature";
+    case state_rule::bulk:
+      return "bulk temperature";
+    case state_rule::free_stream:
+      return "free-stream temperature";
+    case state_rule::mean_of_walls:
+      return "mean of the two walls";
+    case state_rule::none:
+      break;
   }
   return "no properties";
 }
 
 constexpr const char* words(known k) {
   switch (k) {
-    case known::seen_in_source: return "seen in the source";
-    case known::quoted: return "seen in a text that quotes the source";
-    case known::computed: return "supported by own computation";
-    case known::recalled: break;
+    case known::seen_in_source:
+      return "seen in the source";
+    case known::quoted:
+      return "seen in a text that quotes the source";
+    case known::computed:
+      return "supported by own computation";
+    case known::recalled:
+      break;
   }
   return "from memory";
 }
@@ -69,9 +88,9 @@ struct input_info {
   const char* key;     // in a batch line
   const char* symbol;  // in a formula
   const char* words;
-  const char* on;                  // the length scale it is based on, or ""
-  const char* const* choices;      // the words a choice may take, ending in nullptr; else nullptr
-  double otherwise;                // value if left out
+  const char* on;              // the length scale it is based on, or ""
+  const char* const* choices;  // the words a choice may take, ending in nullptr; else nullptr
+  double otherwise;            // value if left out
   bool optional;
 };
 

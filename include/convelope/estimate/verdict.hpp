@@ -75,9 +75,7 @@ class verdict<std::uint64_t> {
   CONVELOPE_FUNCTION constexpr bool possible_input() const {
     return (bits_ & detail::word::impossible) == 0;
   }
-  CONVELOPE_FUNCTION constexpr bool refused() const {
-    return (bits_ & detail::word::refused) != 0;
-  }
+  CONVELOPE_FUNCTION constexpr bool refused() const { return (bits_ & detail::word::refused) != 0; }
   CONVELOPE_FUNCTION constexpr bool scatter_stated() const {
     return (bits_ & detail::word::scatter_not_stated) == 0;
   }

@@ -31,16 +31,18 @@ struct outputs {
 enum class status : unsigned char {
   done,            // also for no faces at all: nothing was written
   lengths_differ,  // nothing was written
-  overlapping      // an output shares memory with another array; nothing was written
+  overlapping,     // an output shares memory with another array; nothing was written
+  no_velocity      // a velocity per face for a surface in a fluid at rest; nothing was written
 };
 
 constexpr const char* words(status s) {
   switch (s) {
     case status::done: return "done";
     case status::lengths_differ: return "arrays of different lengths; nothing was written";
-    case status::overlapping: break;
+    case status::overlapping: return "an output array overlaps another array; nothing was written";
+    case status::no_velocity: break;
   }
-  return "an output array overlaps another array; nothing was written";
+  return "this surface takes no velocity; nothing was written";
 }
 
 namespace detail {
@@ -54,7 +56,7 @@ stretch stretch_of(const A& a) {
 }
 inline bool overlap(const stretch& a, const stretch& b) {
   const auto at = [](const void* p) { return reinterpret_cast<std::uintptr_t>(p); };
-  return at(a.begin) < at(b.end) && at(b.begin) < at(a.end);
+  return a.begin != a.end && b.begin != b.end && at(a.begin) < at(b.end) && at(b.begin) < at(a.end);
 }
 
 inline status checked(const inputs& in, const outputs& out) {
@@ -118,6 +120,9 @@ template <class T = double, wall_geometry G, fluid Fluid, class E>
 status evaluate(const wall_surface<G, Fluid, E>& s, const inputs& in, const outputs& out) {
   const status found = detail::checked(in, out);
   if (found != status::done) return found;
+  if constexpr (!requires(const E& e) { e.velocity; }) {
+    if (!in.velocity_m_s.empty()) return status::no_velocity;
+  }
   const std::size_t n = in.wall_temperature_K.size();
   constexpr auto lanes = static_cast<std::size_t>(scalar_adaptor<T>::lanes);
   std::size_t i = 0;

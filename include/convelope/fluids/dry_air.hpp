@@ -14,9 +14,9 @@ inline constexpr reference dry_air_source{
     known::quoted,
     "ideal-gas density and cp, dilute-gas viscosity and conductivity; the uncertainties include "
     "what that leaves out at 200 K and 0.3 MPa, where it is largest"};
-inline constexpr reference dry_air_fast_source{dry_air_source.authors, dry_air_source.year,
-                                               dry_air_source.where, known::computed,
-                                               "polynomials fitted to dry_air, within 7.7e-5 of it"};
+inline constexpr reference dry_air_fast_source{
+    dry_air_source.authors, dry_air_source.year, dry_air_source.where, known::computed,
+    "polynomials fitted to dry_air, within 7.7e-5 of it"};
 
 // Below 1 kPa the mean free path passes 7 um at 300 K: common practice, not from the sources.
 inline constexpr limit_info dry_air_limits[] = {{"T", 200.0, 2000.0}, {"p", 1e3, 3e5}};

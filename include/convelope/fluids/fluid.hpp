@@ -105,23 +105,26 @@ class fluid_state {
   const fluid_info* info_;
 };
 
-/// The fluid's state at a temperature (of any station) and an absolute pressure.
-template <fluid Fluid, temperature_kind K, class T>
+/// The fluid's state at a temperature (of any station) and an absolute pressure, which may stay a
+/// double where the temperature is a dual or a pack.
+template <fluid Fluid, class K, class T, class P>
+  requires(detail::is_point<K> && (std::is_same_v<P, T> || std::is_same_v<P, double>))
 CONVELOPE_FUNCTION constexpr fluid_state<T> state_of(const Fluid& f, const typed<K, T>& temperature,
-                                                     const typed<kinds::pressure, T>& p) {
+                                                     const typed<kinds::pressure, P>& at_pressure) {
   using W = working_t<T>;
-  const auto raw = f.values(W(temperature.si()), W(p.si()));
+  const W t = W(temperature.si());
+  const W p = [&] {
+    if constexpr (std::is_same_v<P, T>) {
+      return W(at_pressure.si());
+    } else {
+      return scalar_adaptor<W>::constant(at_pressure.si());
+    }
+  }();
+  const auto raw = f.values(t, p);
   const auto number = [](const W& x) { return detail::as_result<T>(x); };
   return fluid_state<T>({number(raw.density), number(raw.specific_heat), number(raw.conductivity),
                          number(raw.viscosity), number(raw.expansion)},
-                        bits_t<T>(f.check(W(temperature.si()), W(p.si()))), f.info());
-}
-template <fluid Fluid, temperature_kind K, class T>
-  requires(!std::is_same_v<T, double>)
-CONVELOPE_FUNCTION constexpr fluid_state<T> state_of(const Fluid& f, const typed<K, T>& temperature,
-                                                     const typed<kinds::pressure>& p) {
-  return state_of(f, temperature,
-                  typed<kinds::pressure, T>::from_si(scalar_adaptor<T>::constant(p.si())));
+                        bits_t<T>(f.check(t, p)), f.info());
 }
 
 }  // namespace v0

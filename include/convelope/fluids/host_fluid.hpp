@@ -89,11 +89,11 @@ class host_fluid {
         continue;
       }
       const T& x = which == detail::tested_number::temperature ? temperature_K : pressure_Pa;
-      if (limit.low != -unbounded) {
+      if (!(limit.low <= -unbounded)) {
         seen = bits(seen | adaptor::bits_where(!(x >= adaptor::constant(limit.low)),
                                                word::of_fluid(i, side::below)));
       }
-      if (limit.high != unbounded) {
+      if (!(limit.high >= unbounded)) {
         seen = bits(seen | adaptor::bits_where(!(x <= adaptor::constant(limit.high)),
                                                word::of_fluid(i, side::above)));
       }

@@ -9,17 +9,37 @@ namespace convelope {
 inline namespace v0 {
 
 namespace detail {
-// The gate of a film coefficient, which also makes one from a Nusselt number on the same length.
-template <class H, template <class> class Nu>
-struct film_gate : gate<H> {
-  using gate<H>::operator();
+// What a film coefficient of kind H is made from: a quantity, or a Nusselt number, a conductivity
+// and the length the Nusselt number is based on.
+template <class H, template <class> class Nu, class... A>
+constexpr bool makes_film = false;
+template <class H, template <class> class Nu, class T>
+constexpr bool makes_film<H, Nu, boost::units::quantity<typename H::unit_type, T>> = true;
+template <class H, template <class> class Nu, class N, class K, class L>
+  requires(is_length<L>)
+constexpr bool makes_film<H, Nu, N, K, L> =
+    is_of_kind<N, Nu<typename L::kind_type>> && is_of_kind<K, kinds::conductivity>;
 
-  /// h = Nu k / L.
-  template <class Number, measures<kinds::conductivity> K, measures_a_length L>
-    requires measures<Number, Nu<typename L::kind_type>>
-  CONVELOPE_FUNCTION constexpr auto operator()(const Number& nu, const K& k, const L& l) const {
-    using T = number_type<Number, K, L>;
-    return carried<H, T>(T(T(nu.si()) * k.si() / l.si()), nu, k, l);
+// One call operator, so that a compiler's complaint lists one candidate.
+template <class H, template <class> class Nu>
+struct film_gate {
+  using kind_type = H;
+
+  template <class... A>
+    requires(makes_film<H, Nu, A...>)
+  CONVELOPE_FUNCTION constexpr auto operator()(const A&... a) const {
+    if constexpr (sizeof...(A) == 1) {
+      return gate<H>{}(a...);
+    } else {
+      return from_nusselt(a...);
+    }
+  }
+
+ private:
+  template <class N, class K, class L>
+  CONVELOPE_FUNCTION static constexpr auto from_nusselt(const N& nu, const K& k, const L& l) {
+    using T = number_type<N, K, L>;
+    return carried<H, T>(T(T(nu.si()) * k.si() / l.si()), nu, k, l);  // h = Nu k / L
   }
 };
 }  // namespace detail
@@ -31,17 +51,19 @@ inline constexpr detail::film_gate<kinds::local_film_coefficient, kinds::local_n
     local_film_coefficient{};
 
 /// Nu = h L / k.
-template <measures<kinds::film_coefficient> H, measures_a_length L,
-          measures<kinds::conductivity> K>
+template <class H, class L, class K>
+  requires(detail::is_of_kind<H, kinds::film_coefficient> && detail::is_length<L> &&
+           detail::is_of_kind<K, kinds::conductivity>)
 CONVELOPE_FUNCTION constexpr auto nusselt(const H& h, const L& l, const K& k) {
   using T = detail::number_type<H, L, K>;
-  return detail::carried<kinds::nusselt<typename L::kind_type>, T>(
-      T(T(h.si()) * l.si() / k.si()), h, l, k);
+  return detail::carried<kinds::nusselt<typename L::kind_type>, T>(T(T(h.si()) * l.si() / k.si()),
+                                                                   h, l, k);
 }
 
 /// St = Nu / (Re Pr), Nu and Re on the same length.
-template <has_kind Number, measures_a_reynolds R, measures<kinds::prandtl> P>
-  requires measures<Number, kinds::nusselt<detail::length_behind<R>>>
+template <class Number, class R, class P>
+  requires(detail::is_a_reynolds<R> && detail::is_of_kind<P, kinds::prandtl> &&
+           detail::is_of_kind<Number, kinds::nusselt<detail::length_behind<R>>>)
 CONVELOPE_FUNCTION constexpr auto stanton(const Number& Nu, const R& Re, const P& Pr) {
   using T = detail::number_type<Number, R, P>;
   return detail::carried<kinds::stanton<detail::length_behind<R>>, T>(
@@ -49,17 +71,24 @@ CONVELOPE_FUNCTION constexpr auto stanton(const Number& Nu, const R& Re, const P
 }
 
 /// Bi = h L / k_solid.
-template <measures<kinds::film_coefficient> H, measures_a_length L,
-          measures<kinds::conductivity> K>
+template <class H, class L, class K>
+  requires(detail::is_of_kind<H, kinds::film_coefficient> && detail::is_length<L> &&
+           detail::is_of_kind<K, kinds::conductivity>)
 CONVELOPE_FUNCTION constexpr auto biot(const H& h, const L& l, const K& k_solid) {
   using T = detail::number_type<H, L, K>;
   return detail::carried<kinds::biot<typename L::kind_type>, T>(
       T(T(h.si()) * l.si() / k_solid.si()), h, l, k_solid);
 }
 
+namespace detail {
+template <class A>
+constexpr bool is_film =
+    is_of_kind<A, kinds::film_coefficient> || is_of_kind<A, kinds::local_film_coefficient>;
+}  // namespace detail
+
 /// q = h (T_wall - T_stream), mean or local.
-template <class H, measures<kinds::temperature_difference> D>
-  requires measures<H, kinds::film_coefficient> || measures<H, kinds::local_film_coefficient>
+template <class H, class D>
+  requires(detail::is_film<H> && detail::is_of_kind<D, kinds::temperature_difference>)
 CONVELOPE_FUNCTION constexpr auto heat_flux_of(const H& h, const D& dT) {
   using T = detail::number_type<H, D>;
   return detail::carried<kinds::heat_flux, T>(T(T(h.si()) * dT.si()), h, dT);

@@ -104,8 +104,14 @@ inline constexpr gate<kinds::roughness> roughness{};
 /// A length that a Reynolds, Nusselt or Rayleigh number can be based on.
 template <class K>
 concept length_kind = std::is_base_of_v<kinds::length_scale, K>;
+namespace detail {
 template <class A>
-concept measures_a_length = has_kind<A> && length_kind<typename A::kind_type>;
+constexpr bool is_length = false;
+template <has_kind A>
+constexpr bool is_length<A> = length_kind<typename A::kind_type>;
+}  // namespace detail
+template <class A>
+concept measures_a_length = detail::is_length<A>;
 
 }  // namespace v0
 }  // namespace convelope

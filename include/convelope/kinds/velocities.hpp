@@ -40,8 +40,14 @@ inline constexpr gate<kinds::rotor_surface_velocity> rotor_surface_velocity{};
 
 template <class K>
 concept velocity_kind = std::is_base_of_v<kinds::velocity_station, K>;
+namespace detail {
 template <class A>
-concept measures_a_velocity = has_kind<A> && velocity_kind<typename A::kind_type>;
+constexpr bool is_velocity = false;
+template <has_kind A>
+constexpr bool is_velocity<A> = velocity_kind<typename A::kind_type>;
+}  // namespace detail
+template <class A>
+concept measures_a_velocity = detail::is_velocity<A>;
 
 }  // namespace v0
 }  // namespace convelope

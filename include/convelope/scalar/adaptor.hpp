@@ -53,7 +53,8 @@ struct scalar_adaptor {
   CONVELOPE_FUNCTION static constexpr bits bits_where(bool m, std::uint64_t word) {
     return m ? word : std::uint64_t{0};
   }
-  /// `word` where x is NaN or infinite. Looks at the exponent bits, so -ffast-math can't fold it.
+  /// `word` where x is NaN or infinite as a double (a wider number beyond 1.8e308 counts). Looks at
+  /// the exponent bits, so -ffast-math can't fold it.
   CONVELOPE_FUNCTION static constexpr bits bits_where_not_finite(const T& x, std::uint64_t word) {
     constexpr std::uint64_t exponent = 0x7ff0000000000000ULL;
     const auto raw = std::bit_cast<std::uint64_t>(static_cast<double>(x));

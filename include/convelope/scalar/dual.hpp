@@ -176,7 +176,7 @@ struct scalar_adaptor<dual<T, Size>> {
   }
   CONVELOPE_FUNCTION static D cbrt(const D& x) {
     const T v = scalar_adaptor<T>::cbrt(x.value);
-    return scaled(x, v, [&] { return T(detail::as<T>(1.0 / 3.0) / (v * v)); });
+    return scaled(x, v, [&] { return T(math::detail::ratio<T>(1, 3) / (v * v)); });
   }
   CONVELOPE_FUNCTION static D exp(const D& x) {
     const T v = scalar_adaptor<T>::exp(x.value);
@@ -200,7 +200,7 @@ struct scalar_adaptor<dual<T, Size>> {
       });
     } else {
       return scaled(x, v,
-                    [&] { return T(v / x.value * detail::as<T>(double(P) / double(Q))); });
+                    [&] { return T(v / x.value * math::detail::ratio<T>(P, Q)); });
     }
   }
   template <class Mask>

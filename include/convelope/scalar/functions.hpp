@@ -103,6 +103,7 @@ struct common_scalar {
   using type = double;
 };
 template <class A>
+  requires(!std::is_void_v<A>)
 struct common_scalar<A> {
   using type = A;
 };

@@ -39,6 +39,12 @@ CONVELOPE_FUNCTION constexpr T root(const T& x) {
   }
 }
 
+// Divided in T, so that a number wider than double gets all its digits; compilers fold it.
+template <class T>
+CONVELOPE_FUNCTION constexpr T ratio(int p, int q) {
+  return T(scalar_adaptor<T>::constant(p) / scalar_adaptor<T>::constant(q));
+}
+
 // P/Q in lowest terms, both positive.
 template <int P, int Q, class T>
 CONVELOPE_FUNCTION constexpr T positive_power(const T& x) {
@@ -53,14 +59,15 @@ CONVELOPE_FUNCTION constexpr T positive_power(const T& x) {
   } else if constexpr (by_roots) {
     return whole_power<P>(root<twos, threes>(x));
   } else {
-    return exp(T(log(x) * scalar_adaptor<T>::constant(double(P) / double(Q))));
+    return exp(T(log(x) * ratio<T>(P, Q)));
   }
 }
 }  // namespace detail
 
 /// x^(P/Q) for x >= 0, chosen at compile time: square and cube roots and products where the
 /// denominator allows (2, 3, 4, 6, 8, 12, 16 ...), otherwise one exp/log pair.
-/// Error: 4 units in the last place by roots, about |log x| P/Q units by the exp/log pair.
+/// Error in units in the last place, P/Q in lowest terms: below 2 P by roots, below
+/// 1.5 (1 + |log x| P/Q) by the exp/log pair.
 template <int P, int Q = 1, class T>
 CONVELOPE_FUNCTION constexpr T power(const T& x) {
   static_assert(Q > 0, "write the sign of the exponent in its numerator");

@@ -31,13 +31,23 @@ struct scalar_adaptor<std::experimental::simd<double, Abi>> {
     return r;
   }
   static bits bits_where(const typename pack::mask_type& m, std::uint64_t word) {
-    return std::bit_cast<bits>(select(m, pack(std::bit_cast<double>(word)), pack(0.0)));
+    if constexpr (std::is_trivially_copyable_v<pack>) {
+      return std::bit_cast<bits>(select(m, pack(std::bit_cast<double>(word)), pack(0.0)));
+    } else {  // fixed_size packs
+      return bits([&](auto i) { return m[i] ? word : std::uint64_t{0}; });
+    }
   }
   static bits bits_where_not_finite(const pack& x, std::uint64_t word) {
-    const bits exponent(0x7ff0000000000000ULL);
-    bits r(word);
-    where((std::bit_cast<bits>(x) & exponent) != exponent, r) = bits(0);
-    return r;
+    if constexpr (std::is_trivially_copyable_v<pack>) {
+      const bits exponent(0x7ff0000000000000ULL);
+      bits r(word);
+      where((std::bit_cast<bits>(x) & exponent) != exponent, r) = bits(0);
+      return r;
+    } else {
+      return bits([&](auto i) {
+        return scalar_adaptor<double>::bits_where_not_finite(static_cast<double>(x[i]), word);
+      });
+    }
   }
 };
 

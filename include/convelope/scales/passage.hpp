@@ -22,6 +22,9 @@ struct passage_step {
   T heat_W;                 // from the walls to the fluid
   T pressure_drop_Pa;       // friction
   T reynolds;               // on the hydraulic diameter
+  double begin_m;           // behind the inlet
+  double end_m;
+  T thermal_entry_m;        // behind which the temperature profile counts as developed
   T flux_W_m2[Patches];           // from each patch
   T coefficient_W_m2K[Patches];   // of each patch
   bits_t<T> bits[Patches];
@@ -35,7 +38,9 @@ struct passage_step {
 /// Each segment: m cp dT_b/dx = sum h_i P_i (T_i - T_b) with h constant along it, solved exactly
 /// (exponential), so a long segment is stable and heat_W = m cp (T_out - T_in) to rounding.
 /// Properties and h are taken at the segment's mean bulk temperature, found in one
-/// predictor-corrector step: second order in the segment length.
+/// predictor-corrector step: second order in the segment length where properties vary, order 1.5
+/// in a laminar entrance; with constant properties the length makes no difference. The sign of the
+/// mass flow does not matter: march from the end where the fluid enters.
 template <class Section, fluid Fluid, class T = double>
 class passage {
  public:
@@ -86,7 +91,7 @@ class passage {
     for (std::size_t i = 0; i < Patches; ++i) {
       const film<T> f = geometry.film_at(fluid_, in_duct, walls[i].temperature_K);
       s.coefficient_W_m2K[i] = f.coefficient;
-      s.bits[i] = f.bits;
+      s.bits[i] = bits_t<T>(f.bits | bits_t<T>(perimeter_bits(walls[i].perimeter_m)));
       s.variance[i] = f.variance;
       s.turbulent_share = f.share[1];
       const T c = T(f.coefficient * (walls[i].perimeter_m * length_m));
@@ -102,12 +107,20 @@ class passage {
     s.inlet_K = bulk_;
     s.outlet_K = T(bulk_ + rise);
     s.heat_W = T(capacity * rise);
-    // Mean bulk excess from sum c_i (T_i - mean) = capacity * rise.
-    s.mean_K = T(bulk_ + (weighted_wall - s.heat_W) / conductance);
+    // From sum c_i (T_i - mean) = heat, written so that no conductance is no division by zero.
+    s.mean_K = T(bulk_ + weighted_wall / capacity * remainder(ntu, mean_factor));
     for (std::size_t i = 0; i < Patches; ++i) {
       s.flux_W_m2[i] = T(s.coefficient_W_m2K[i] * (walls[i].temperature_K - s.mean_K));
     }
     s.reynolds = T(u * D * v.density / v.viscosity);
+    s.begin_m = from_inlet_;
+    s.end_m = from_inlet_ + length_m;
+    // Laminar 0.05 Re Pr Dh, turbulent 10 Dh (common practice for the latter).
+    s.thermal_entry_m = T(D * math::weighted(
+                                  friction::entrance_length_laminar_temperature::formula(
+                                      s.reynolds, v.prandtl()),
+                                  T(scalar_adaptor<T>::constant(10.0)),
+                                  math::hand_over(s.reynolds, 2300.0, 4000.0)));
     s.pressure_drop_Pa = T(Section::darcy(s.reynolds) * (0.5 * length_m / D) * v.density * u * u);
     return s;
   }
@@ -119,6 +132,18 @@ class passage {
     const T safe = math::larger(x, T(scalar_adaptor<T>::constant(1e-2)));
     return math::select(x < T(scalar_adaptor<T>::constant(1e-2)), series,
                         T((1.0 - math::exp(T(-safe))) / safe));
+  }
+
+  /// (1 - m) / x for m = (1 - e^-x) / x.
+  CONVELOPE_FUNCTION static constexpr T remainder(const T& x, const T& m) {
+    const T series =
+        T(0.5 - x * (1.0 / 6.0 - x * (1.0 / 24.0 - x * (1.0 / 120.0 - x * (1.0 / 720.0)))));
+    const T safe = math::larger(x, T(scalar_adaptor<T>::constant(1e-2)));
+    return math::select(x < T(scalar_adaptor<T>::constant(1e-2)), series, T((1.0 - m) / safe));
+  }
+  // A patch may have no perimeter (it takes no part), but not a negative or infinite one.
+  CONVELOPE_FUNCTION static constexpr std::uint64_t perimeter_bits(double perimeter_m) {
+    return perimeter_m == 0.0 ? 0 : detail::usable_length(perimeter_m).bits;
   }
 
   Section section_;

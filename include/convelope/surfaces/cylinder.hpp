@@ -3,7 +3,7 @@
 
 #include "convelope/correlations/external/cylinder_crossflow.hpp"
 #include "convelope/correlations/natural/horizontal_cylinder.hpp"
-#include "convelope/surfaces/film.hpp"
+#include "convelope/surfaces/buoyancy.hpp"
 
 namespace convelope {
 inline namespace v0 {
@@ -37,10 +37,8 @@ struct cylinder_in_crossflow {
     const T Pr = v.prandtl();
 
     const T Re = detail::rounded_reynolds(v, s.velocity.si(), d.metres);
-    const T Ra = math::smooth_magnitude(
-        detail::signed_rayleigh(v, detail::expansion_by_rule(f, v, ambient, p), T(wall - ambient),
-                                d.metres, gravity.si()),
-        detail::least_rayleigh);
+    const T Ra =
+        detail::buoyancy<T>(f, v, wall, ambient, p, d.metres, gravity.si()).Ra;
     constexpr double conduction_4 = 0.3 * 0.3 * 0.3 * 0.3;
     const T F4 = T(math::power<4>(forced::formula(Re, Pr)) - conduction_4);
     const T N4 = math::power<4>(natural::formula(Ra, Pr));

@@ -32,12 +32,9 @@ inline constexpr speakers speakers_of{{&record_of<C>...}, static_cast<int>(sizeo
 // Below this share a correlation is not asked whether it is inside its range.
 inline constexpr double heard_from = 1e-3;
 
-// Numbers this small are rounded off (math::smooth_magnitude), so that roots of them keep a
-// finite slope at rest.
+// Reynolds numbers this small are rounded off (math::smooth_magnitude), so that roots of them keep
+// a finite slope at rest.
 inline constexpr double least_reynolds = 1e-6;
-inline constexpr double least_rayleigh = 1e-10;
-// Scale of Ra on which hot side turns into cold side.
-inline constexpr double side_rayleigh = 1.0;
 
 template <class C, class T>
 CONVELOPE_FUNCTION constexpr plain_t<T> variance_of() {
@@ -75,28 +72,6 @@ CONVELOPE_FUNCTION constexpr bits_t<T> asked(int slot, const plain_t<T>& share, 
 
 template <fluid Fluid>
 constexpr bool is_gas = Fluid::expansion_at == expansion_rule::ambient;
-
-/// beta by the fluid's rule: gases at the ambient temperature, liquids at the film temperature.
-template <fluid Fluid, class T>
-CONVELOPE_FUNCTION constexpr T expansion_by_rule(const Fluid& f, const fluid_values<T>& at_film,
-                                                 const T& ambient, const T& p) {
-  if constexpr (!is_gas<Fluid>) {
-    return at_film.expansion;
-  } else if constexpr (requires { f.expansion(ambient, p); }) {
-    return f.expansion(ambient, p);
-  } else {
-    return f.values(ambient, p).expansion;
-  }
-}
-
-/// g beta dT L^3 / (nu alpha), with the sign of beta dT.
-template <class T>
-CONVELOPE_FUNCTION constexpr T signed_rayleigh(const fluid_values<T>& v, const T& beta,
-                                               const T& dT, double length, double g) {
-  const double k = g * length * length * length;
-  return T(k * beta * dT * v.density * v.density * v.specific_heat /
-           (v.viscosity * v.conductivity));
-}
 
 /// rho |u| L / mu, rounded off at rest.
 template <class T>

@@ -3,6 +3,7 @@
 
 #include "convelope/correlations/natural/horizontal_plate_down.hpp"
 #include "convelope/correlations/natural/horizontal_plate_up.hpp"
+#include "convelope/surfaces/buoyancy.hpp"
 #include "convelope/surfaces/flat_plate.hpp"
 
 namespace convelope {
@@ -46,13 +47,10 @@ struct horizontal_wall {
     const fluid_values<T> v = f.values(at, p);
     const T Pr = v.prandtl();
 
-    const T Ra_signed =
-        detail::signed_rayleigh(v, detail::expansion_by_rule(f, v, ambient, p), T(wall - ambient),
-                                b.metres, gravity.si());
-    const T Ra = math::smooth_magnitude(Ra_signed, detail::least_rayleigh);
+    const detail::buoyancy<T> drive(f, v, wall, ambient, p, b.metres, gravity.si());
+    const T& Ra = drive.Ra;
     const double up = face == facing::up ? 1.0 : -1.0;
-    const T w =
-        T(0.5 * (1.0 - up * math::smooth_sign(Ra_signed, detail::side_rayleigh)));
+    const T w = T(0.5 * (1.0 - up * drive.side));
     const T natural_Nu = math::weighted(driving::formula(Ra, Pr), holding::formula(Ra, Pr), w);
 
     const T Re = detail::rounded_reynolds(v, s.velocity.si(), l.metres);

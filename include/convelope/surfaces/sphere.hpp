@@ -3,7 +3,7 @@
 
 #include "convelope/correlations/external/sphere.hpp"
 #include "convelope/correlations/natural/sphere_natural.hpp"
-#include "convelope/surfaces/film.hpp"
+#include "convelope/surfaces/buoyancy.hpp"
 
 namespace convelope {
 inline namespace v0 {
@@ -40,10 +40,8 @@ struct sphere_in_stream {
     const T Pr_stream = at_stream.prandtl();
     const T mu_ratio = T(at_stream.viscosity / at_wall.viscosity);
     const T Pr_film = at_film.prandtl();
-    const T Ra = math::smooth_magnitude(
-        detail::signed_rayleigh(at_film, detail::expansion_by_rule(f, at_film, ambient, p),
-                                T(wall - ambient), d.metres, gravity.si()),
-        detail::least_rayleigh);
+    const T Ra =
+        detail::buoyancy<T>(f, at_film, wall, ambient, p, d.metres, gravity.si()).Ra;
     // Each on its own conductivity, brought to that of the film state.
     const T Nu_F = T(forced::formula(Re, Pr_stream, mu_ratio) *
                      (at_stream.conductivity / at_film.conductivity));

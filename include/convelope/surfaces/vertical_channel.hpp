@@ -2,7 +2,7 @@
 #define CONVELOPE_SURFACES_VERTICAL_CHANNEL_HPP
 
 #include "convelope/correlations/natural/vertical_channel.hpp"
-#include "convelope/surfaces/film.hpp"
+#include "convelope/surfaces/buoyancy.hpp"
 
 namespace convelope {
 inline namespace v0 {
@@ -32,10 +32,8 @@ struct open_vertical_channel {
     const T& p = s.pressure.si();
     const T at = T(0.5 * (wall + ambient));
     const fluid_values<T> v = f.values(at, p);
-    const T Ra = math::smooth_magnitude(
-        detail::signed_rayleigh(v, detail::expansion_by_rule(f, v, ambient, p), T(wall - ambient),
-                                b.metres, gravity.si()),
-        detail::least_rayleigh);
+    const T Ra =
+        detail::buoyancy<T>(f, v, wall, ambient, p, b.metres, gravity.si()).Ra;
     const T El = T(Ra * (b.metres / h.metres));
 
     const P all = scalar_adaptor<P>::constant(1.0);

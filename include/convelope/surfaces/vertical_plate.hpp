@@ -2,6 +2,7 @@
 #define CONVELOPE_SURFACES_VERTICAL_PLATE_HPP
 
 #include "convelope/correlations/natural/vertical_plate.hpp"
+#include "convelope/surfaces/buoyancy.hpp"
 #include "convelope/surfaces/flat_plate.hpp"
 
 namespace convelope {
@@ -58,10 +59,8 @@ struct vertical_wall {
     const T Pr = v.prandtl();
     const T& u = s.velocity.si();
 
-    const T Ra_signed =
-        detail::signed_rayleigh(v, detail::expansion_by_rule(f, v, ambient, p), T(wall - ambient),
-                                h.metres, gravity.si());
-    const T Ra = math::smooth_magnitude(Ra_signed, detail::least_rayleigh);
+    const detail::buoyancy<T> drive(f, v, wall, ambient, p, h.metres, gravity.si());
+    const T& Ra = drive.Ra;
     // Handed over in Ra^(1/6), which the formulas share: 31.6 is 1e9, 46.4 is 1e10.
     const T w = math::hand_over(math::power<1, 6>(Ra), 31.622776601683793, 46.415888336127789);
     const T natural_Nu = math::weighted(natural_laminar::formula(Ra, Pr), natural_all::formula(Ra, Pr), w);
@@ -72,7 +71,7 @@ struct vertical_wall {
 
     const T F3 = math::power<3>(layer.Nu);
     const T N3 = math::power<3>(natural_Nu);
-    const T Nu6 = T(F3 * F3 + N3 * N3 + 2.0 * assistance(Ra_signed, Re_signed) * F3 * N3);
+    const T Nu6 = T(F3 * F3 + N3 * N3 + 2.0 * assistance(drive.side, Re_signed) * F3 * N3);
 
     const P f6 = P(plain(F3) * plain(F3));
     const P n6 = P(plain(N3) * plain(N3));
@@ -93,13 +92,12 @@ struct vertical_wall {
 
  private:
   template <class T>
-  CONVELOPE_FUNCTION constexpr T assistance(const T& Ra_signed, const T& Re_signed) const {
+  CONVELOPE_FUNCTION constexpr T assistance(const T& side, const T& Re_signed) const {
     if (direction == stream_direction::horizontal) {
       return scalar_adaptor<T>::constant(0.41421356237309503);
     }
     const double up = direction == stream_direction::upward ? 1.0 : -1.0;
-    const T s = T(up * math::smooth_sign(Ra_signed, detail::side_rayleigh) *
-                  math::smooth_sign(Re_signed, 1.0));
+    const T s = T(up * side * math::smooth_sign(Re_signed, 1.0));
     return T(s * (15.0 + s) * (1.0 / 16.0));
   }
 };

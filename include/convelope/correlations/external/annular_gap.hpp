@@ -36,8 +36,9 @@ struct taylor_gazley
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Ta, const T& Pr) {
-    const T vortices = T(0.202 * power<63, 100>(Ta));
-    const T turbulent = T(0.386 * sqrt(Ta));
+    const T turning = larger(Ta, T(1.0));  // keeps log(0) away
+    const T vortices = T(0.202 * power<63, 100>(turning));
+    const T turbulent = T(0.386 * sqrt(turning));
     const T flow = T(select(Ta <= 100.0, vortices, turbulent) * power<27, 100>(Pr));
     return select(Ta < 41.0, T(2.0), flow);
   }
@@ -62,7 +63,8 @@ struct becker_kaye_1962
     const auto lower = Ta_m <= 1e4;
     const T constant = select(lower, T(0.128), T(0.409));
     const T exponent = select(lower, T(0.367), T(0.241));
-    return select(Ta_m < 1700.0, T(2.0), T(constant * exp(T(exponent * log(Ta_m)))));
+    const T turning = larger(Ta_m, T(1.0));  // keeps log(0) away
+    return select(Ta_m < 1700.0, T(2.0), T(constant * exp(T(exponent * log(turning)))));
   }
 };
 
@@ -141,6 +143,7 @@ struct conduction_limit
     : correlation<conduction_limit, nusselt_of<hydraulic_diameter>, radius_ratio> {
   static constexpr const char* id = "annular-gap/conduction-limit";
   static constexpr const char* quantity = "Nu_2b";
+  static constexpr const char* keys[] = {"eta"};
   static constexpr reference source{"J. Fourier", 1822, "Theorie analytique de la chaleur",
                                     known::computed, "the solution for concentric cylinders"};
   static constexpr auto envelope = within(limit<radius_ratio>(1e-6, 1.0));  // infinite at 0

@@ -19,9 +19,9 @@ struct churchill_chu_1975
     : correlation<churchill_chu_1975, nusselt_of<diameter>, rayleigh_of<diameter>, prandtl_number> {
   static constexpr const char* id = "horizontal-cylinder/churchill-chu-1975";
   static constexpr const char* quantity = "Nu";
-  static constexpr reference source{
-      "S. W. Churchill, H. H. S. Chu", 1975, "Int. J. Heat Mass Transfer 18, 1049-1053",
-      known::quoted, "printed ranges: 1e-6 .. 1e13, 1e-5 .. 1e12, up to 1e12"};
+  static constexpr reference source{"S. W. Churchill, H. H. S. Chu", 1975,
+                                    "Int. J. Heat Mass Transfer 18, 1049-1053", known::quoted,
+                                    "printed ranges: 1e-6 .. 1e13, 1e-5 .. 1e12, up to 1e12"};
   static constexpr auto envelope =
       within(limit<rayleigh_of<diameter>>(1e-5, 1e12), limit<prandtl_number>(0.0, unbounded));
   static constexpr double scatter = not_stated;
@@ -39,14 +39,13 @@ struct churchill_chu_1975
 /// Range: 1e-6 <= Ra <= 1e9, all Pr. Scatter not stated; in air 26 % below raithby_hollands_1998 at
 /// Ra 1, 20 % above it at 1e-6.
 /// Source: Churchill and Chu 1975, Int. J. Heat Mass Transfer 18, 1049-1053.
-struct churchill_chu_laminar_1975
-    : correlation<churchill_chu_laminar_1975, nusselt_of<diameter>, rayleigh_of<diameter>,
-                  prandtl_number> {
+struct churchill_chu_laminar_1975 : correlation<churchill_chu_laminar_1975, nusselt_of<diameter>,
+                                                rayleigh_of<diameter>, prandtl_number> {
   static constexpr const char* id = "horizontal-cylinder/churchill-chu-laminar-1975";
   static constexpr const char* quantity = "Nu";
-  static constexpr reference source{
-      "S. W. Churchill, H. H. S. Chu", 1975, "Int. J. Heat Mass Transfer 18, 1049-1053",
-      known::computed, "thin-layer theory gives 0.5176 for 0.518"};
+  static constexpr reference source{"S. W. Churchill, H. H. S. Chu", 1975,
+                                    "Int. J. Heat Mass Transfer 18, 1049-1053", known::computed,
+                                    "thin-layer theory gives 0.5176 for 0.518"};
   static constexpr auto envelope =
       within(limit<rayleigh_of<diameter>>(1e-6, 1e9), limit<prandtl_number>(0.0, unbounded));
   static constexpr double scatter = not_stated;
@@ -98,9 +97,8 @@ struct morgan_1975 : correlation<morgan_1975, nusselt_of<diameter>, rayleigh_of<
 /// Range: 1e-10 <= Ra <= 1e12, 0.01 <= Pr <= 2000. Scatter not stated.
 /// Source: Raithby and Hollands 1998, in Rohsenow, Hartnett, Cho (eds), Handbook of Heat Transfer,
 /// 3rd ed., ch. 4.
-struct raithby_hollands_1998
-    : correlation<raithby_hollands_1998, nusselt_of<diameter>, rayleigh_of<diameter>,
-                  prandtl_number> {
+struct raithby_hollands_1998 : correlation<raithby_hollands_1998, nusselt_of<diameter>,
+                                           rayleigh_of<diameter>, prandtl_number> {
   static constexpr const char* id = "horizontal-cylinder/raithby-hollands-1998";
   static constexpr const char* quantity = "Nu";
   static constexpr reference source{

@@ -18,8 +18,8 @@ namespace horizontal_plate_down {
 /// Range: 1e5 <= Ra <= 1e10. Scatter not stated. Boundary-layer theory has the exponent 1/5:
 /// radziemska_lewandowski_2001.
 /// Source: McAdams 1954, Heat Transmission, 3rd ed.
-struct mcadams_1954 : correlation<mcadams_1954, nusselt_of<area_over_perimeter>,
-                                  rayleigh_of<area_over_perimeter>> {
+struct mcadams_1954
+    : correlation<mcadams_1954, nusselt_of<area_over_perimeter>, rayleigh_of<area_over_perimeter>> {
   static constexpr const char* id = "horizontal-plate-down/mcadams-1954";
   static constexpr const char* quantity = "Nu";
   static constexpr reference source{
@@ -84,9 +84,8 @@ struct fujii_imura_1972
 /// Range: 1e3 <= Ra <= 1e10. Scatter not stated.
 /// Source: Raithby and Hollands 1998, in Rohsenow, Hartnett, Cho (eds), Handbook of Heat Transfer,
 /// 3rd ed., ch. 4.
-struct raithby_hollands_1998
-    : correlation<raithby_hollands_1998, nusselt_of<area_over_perimeter>,
-                  rayleigh_of<area_over_perimeter>, prandtl_number> {
+struct raithby_hollands_1998 : correlation<raithby_hollands_1998, nusselt_of<area_over_perimeter>,
+                                           rayleigh_of<area_over_perimeter>, prandtl_number> {
   static constexpr const char* id = "horizontal-plate-down/raithby-hollands-1998";
   static constexpr const char* quantity = "Nu";
   static constexpr reference source{"G. D. Raithby, K. G. T. Hollands", 1998,
@@ -98,8 +97,7 @@ struct raithby_hollands_1998
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Ra, const T& Pr) {
-    const T thin = T(0.527 * power<1, 5>(Ra) *
-                     power<-2, 9>(T(1.0 + power<9, 10>(T(1.9 / Pr)))));
+    const T thin = T(0.527 * power<1, 5>(Ra) * power<-2, 9>(T(1.0 + power<9, 10>(T(1.9 / Pr)))));
     return detail::thin_layer::thickened(T(2.5), thin);
   }
 };

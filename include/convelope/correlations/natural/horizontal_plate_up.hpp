@@ -128,9 +128,8 @@ struct mcadams_turbulent_1954
 /// Range: 1 <= Ra <= 1e10, all Pr. Scatter not stated.
 /// Source: Raithby and Hollands 1998, in Rohsenow, Hartnett, Cho (eds), Handbook of Heat Transfer,
 /// 3rd ed., ch. 4.
-struct raithby_hollands_1998
-    : correlation<raithby_hollands_1998, nusselt_of<area_over_perimeter>,
-                  rayleigh_of<area_over_perimeter>, prandtl_number> {
+struct raithby_hollands_1998 : correlation<raithby_hollands_1998, nusselt_of<area_over_perimeter>,
+                                           rayleigh_of<area_over_perimeter>, prandtl_number> {
   static constexpr const char* id = "horizontal-plate-up/raithby-hollands-1998";
   static constexpr const char* quantity = "Nu";
   static constexpr reference source{"G. D. Raithby, K. G. T. Hollands", 1998,

@@ -16,9 +16,8 @@ namespace sphere {
 /// Range: Ra <= 1e8, Pr >= 0.7. Scatter not stated. The author's all-range form, churchill_1983, is
 /// 31 % above it at Ra 1e9 in air and 92 % at 1e11.
 /// Source: Churchill 1983, Heat Exchanger Design Handbook, sec. 2.5.7.
-struct churchill_laminar_1983
-    : correlation<churchill_laminar_1983, nusselt_of<diameter>, rayleigh_of<diameter>,
-                  prandtl_number> {
+struct churchill_laminar_1983 : correlation<churchill_laminar_1983, nusselt_of<diameter>,
+                                            rayleigh_of<diameter>, prandtl_number> {
   static constexpr const char* id = "sphere/churchill-laminar-1983";
   static constexpr const char* quantity = "Nu";
   static constexpr reference source{
@@ -54,8 +53,7 @@ struct churchill_1983
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Ra, const T& Pr) {
-    const T scaled =
-        T(Ra * power<-16, 9>(detail::thin_layer::prandtl_bracket(0.469, Pr)));
+    const T scaled = T(Ra * power<-16, 9>(detail::thin_layer::prandtl_bracket(0.469, Pr)));
     return T(2.0 + 0.589 * power<1, 4>(scaled) * power<1, 12>(T(1.0 + 7.44e-8 * scaled)));
   }
 };

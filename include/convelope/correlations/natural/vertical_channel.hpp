@@ -50,8 +50,7 @@ CONVELOPE_FUNCTION constexpr T isothermal(double c, const T& El) {
 /// Source: Bar-Cohen and Rohsenow 1984, J. Heat Transfer 106, 116-123.
 struct bar_cohen_rohsenow_isothermal_symmetric_1984
     : correlation<bar_cohen_rohsenow_isothermal_symmetric_1984, nusselt_of<gap>, elenbaas_number> {
-  static constexpr const char* id =
-      "vertical-channel/bar-cohen-rohsenow-isothermal-symmetric-1984";
+  static constexpr const char* id = "vertical-channel/bar-cohen-rohsenow-isothermal-symmetric-1984";
   static constexpr const char* quantity = "Nu";
   static constexpr reference source{"A. Bar-Cohen, W. M. Rohsenow", 1984,
                                     "J. Heat Transfer 106, 116-123", known::quoted,
@@ -90,9 +89,9 @@ struct bar_cohen_rohsenow_isothermal_one_side_1984
 /// Mean Nusselt number of the two walls, each isothermal, fully developed flow. El and Nu both on
 /// the MEAN excess of the walls; r_T = (T_2 - T_inlet)/(T_1 - T_inlet).
 /// Nu = El (4 r_T^2 + 7 r_T + 4) / (90 (1 + r_T)^2)
-/// Exact for constant properties as El -> 0. Range: the source says El << 1; El <= 1 taken, where it
-/// is 0.9 % high (Pr -> inf, equal walls). r_T >= 0.
-/// Source: Aung 1972, Int. J. Heat Mass Transfer 15, 1577-1580.
+/// Exact for constant properties as El -> 0. Range: the source says El << 1; El <= 1 taken, where
+/// it is 0.9 % high (Pr -> inf, equal walls). r_T >= 0. Source: Aung 1972, Int. J. Heat Mass
+/// Transfer 15, 1577-1580.
 struct aung_fully_developed_1972
     : correlation<aung_fully_developed_1972, nusselt_of<gap>, elenbaas_number, wall_excess_ratio> {
   static constexpr const char* id = "vertical-channel/aung-fully-developed-1972";

@@ -7,9 +7,9 @@
 namespace convelope {
 inline namespace v0 {
 
-// Uniform heat flux q: El* = (g beta q b^4/(k nu alpha)) b/H, Nu = q b/(k dT) with the wall's dT over
-// the inlet at the exit or at mid height. 2.51 = 0.63^-2 belongs to Pr -> inf; at wide gaps these are
-// some 20 % high in air.
+// Uniform heat flux q: El* = (g beta q b^4/(k nu alpha)) b/H, Nu = q b/(k dT) with the wall's dT
+// over the inlet at the exit or at mid height. 2.51 = 0.63^-2 belongs to Pr -> inf; at wide gaps
+// these are some 20 % high in air.
 namespace vertical_channel {
 
 namespace parts {

@@ -27,15 +27,13 @@ struct choice_words<vertical_channel::excess_taken> {
 
 namespace vertical_channel {
 
-/// The gap, over the height, at which thin isothermal plates stacked side by side give off most heat
-/// per width of the stack: the maximum of Nu/b^2.
-/// b/H = 2.714 Ra_H^(-1/4) both walls heated, 2.154 Ra_H^(-1/4) one wall heated
-/// Range: plates much thinner than the gap; Ra_H >= 54.3, where the gap is as wide as the channel is
-/// high. At the optimum Nu = 1.307 or 1.04 on the gap.
+/// The gap, over the height, at which thin isothermal plates stacked side by side give off most
+/// heat per width of the stack: the maximum of Nu/b^2. b/H = 2.714 Ra_H^(-1/4) both walls
+/// heated, 2.154 Ra_H^(-1/4) one wall heated Range: plates much thinner than the gap; Ra_H >= 54.3,
+/// where the gap is as wide as the channel is high. At the optimum Nu = 1.307 or 1.04 on the gap.
 /// Source: Bar-Cohen and Rohsenow 1984, J. Heat Transfer 106, 116-123.
-struct optimum_spacing_isothermal
-    : correlation<optimum_spacing_isothermal, gap_over_height, rayleigh_of<height>,
-                  choice_of<heated_walls>> {
+struct optimum_spacing_isothermal : correlation<optimum_spacing_isothermal, gap_over_height,
+                                                rayleigh_of<height>, choice_of<heated_walls>> {
   static constexpr const char* id = "vertical-channel/optimum-spacing-isothermal";
   static constexpr const char* quantity = "S_over_L";
   static constexpr reference source{"A. Bar-Cohen, W. M. Rohsenow", 1984,
@@ -51,12 +49,11 @@ struct optimum_spacing_isothermal
   }
 };
 
-/// The same for uniform heat flux, on Ra* = g beta q H^4/(k nu alpha), with the constants of the exit
-/// excess or of the mid-height excess.
-/// b/H = c Ra*^(-1/5), c = 2.12 (both walls) or 1.69 (one) at the exit, 1.472 or 1.169 at mid height
-/// Range: plates much thinner than the gap; Ra* >= 42.8, where the gap is as wide as the channel is
-/// high.
-/// Source: Bar-Cohen and Rohsenow 1984, J. Heat Transfer 106, 116-123.
+/// The same for uniform heat flux, on Ra* = g beta q H^4/(k nu alpha), with the constants of the
+/// exit excess or of the mid-height excess. b/H = c Ra*^(-1/5), c = 2.12 (both walls) or 1.69 (one)
+/// at the exit, 1.472 or 1.169 at mid height Range: plates much thinner than the gap; Ra* >= 42.8,
+/// where the gap is as wide as the channel is high. Source: Bar-Cohen and Rohsenow 1984, J. Heat
+/// Transfer 106, 116-123.
 struct optimum_spacing_isoflux
     : correlation<optimum_spacing_isoflux, gap_over_height, flux_rayleigh_of<height>,
                   choice_of<heated_walls>, choice_of<excess_taken>> {
@@ -74,8 +71,8 @@ struct optimum_spacing_isoflux
   CONVELOPE_FUNCTION static constexpr T formula(const T& Ra, heated_walls heated,
                                                 excess_taken excess) {
     const bool both = heated == heated_walls::both;
-    const double c = excess == excess_taken::at_exit ? (both ? 2.12 : 1.69)
-                                                     : (both ? 1.472 : 1.169);
+    const double c =
+        excess == excess_taken::at_exit ? (both ? 2.12 : 1.69) : (both ? 1.472 : 1.169);
     return T(c * power<-1, 5>(Ra));
   }
 };

@@ -77,8 +77,7 @@ struct lefevre_1956 : correlation<lefevre_1956, local_nusselt_of<distance_from_e
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Gr, const T& Pr) {
-    return T(0.75 * power<1, 4>(T(0.25 * Gr * Pr * Pr /
-                                  (0.609 + 1.221 * sqrt(Pr) + 1.238 * Pr))));
+    return T(0.75 * power<1, 4>(T(0.25 * Gr * Pr * Pr / (0.609 + 1.221 * sqrt(Pr) + 1.238 * Pr))));
   }
 };
 
