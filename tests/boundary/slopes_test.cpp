@@ -89,7 +89,8 @@ TEST_CASE("slopes: plate along a stream, 50 digits") {
 }
 TEST_CASE("slopes: vertical wall, 50 digits") {
   in_air_and_water(vertical_wall{number<kinds::height>(0.6)});
-  in_air_and_water(vertical_wall{number<kinds::height>(0.6), stream_direction::horizontal});
+  in_air_and_water(vertical_wall{number<kinds::height>(0.6), stream_direction::horizontal,
+                                 number<kinds::plate_length>(0.9)});
 }
 TEST_CASE("slopes: horizontal wall, 50 digits") {
   in_air_and_water(horizontal_wall{number<kinds::area_over_perimeter>(0.1),

@@ -11,6 +11,7 @@
 #include <numbers>
 
 #include "convelope/correlations/external/flat_plate_laminar.hpp"
+#include "convelope/correlations/friction/flat_plate_friction.hpp"
 #include "deviation.hpp"
 
 namespace plate = convelope::flat_plate;
@@ -135,5 +136,19 @@ TEST_SUITE("first principles: flat plate") {
   TEST_CASE("library: liquid metals") {
     using slug = plate::laminar_low_prandtl_local;
     check_band(band<slug>(&plate_layer::isothermal, 1.0, {1e-3, 0.01, 0.05}), 3.04, 20.03);
+  }
+
+  TEST_CASE("library: skin friction") {
+    // tau_w/(rho U^2/2) is 2 f''(0)/Re^(1/2), and its mean twice that: both rounded down by 0.02 %
+    namespace friction = convelope::flat_plate_friction;
+    const double shear = blasius_wall_shear();
+    const auto local = [=](double Re) {
+      return friction::blasius_local::formula(Re) * std::sqrt(Re) / (2.0 * shear);
+    };
+    const auto mean = [=](double Re) {
+      return friction::blasius_average::formula(Re) * std::sqrt(Re) / (4.0 * shear);
+    };
+    check_band(deviations({1e3, 5e5}, local), -0.017, -0.017, 0.003);
+    check_band(deviations({1e3, 5e5}, mean), -0.017, -0.017, 0.003);
   }
 }

@@ -57,7 +57,8 @@ TEST_CASE("duct: no step over its diameter and along it, from the inlet itself")
     // x to the power 1/3 there: finite in x, though its own slope is not.
     const auto behind = point_of(round_segment(0.05, 1e-21, 0.05), dry_air{}, u, 300.0, 380.0);
     CHECK(behind.h == doctest::Approx(at_inlet.h).epsilon(1e-6));
-    CHECK(behind.slope == doctest::Approx(at_inlet.slope).epsilon(1e-6));
+    CHECK(behind.by_wall == doctest::Approx(at_inlet.by_wall).epsilon(1e-6));
+    CHECK(behind.by_velocity == doctest::Approx(at_inlet.by_velocity).epsilon(1e-6));
   }
 }
 

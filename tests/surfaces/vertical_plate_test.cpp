@@ -10,7 +10,7 @@ using namespace scan;
 namespace {
 
 vertical_wall of_height(double H, stream_direction d = stream_direction::upward) {
-  return {number<kinds::height>(H), d};
+  return {number<kinds::height>(H), d, number<kinds::plate_length>(H)};
 }
 template <stream_direction Direction>
 vertical_wall any_wall(random_numbers& r) {

@@ -88,6 +88,7 @@ cv::stream<number> outer_air(const outer_spot& at) {
 cv::vertical_wall upright(const outer_spot& at) {
   cv::vertical_wall wall{as<kinds::height>(at.height)};
   wall.direction = cv::stream_direction::horizontal;
+  wall.length = as<kinds::plate_length>(at.length);
   return wall;
 }
 
@@ -140,11 +141,11 @@ film_words convelope_walls::outer_words(const outer_spot& at) const {
   const bool sideways = at.faces == facing::sideways;
   const auto v = air.values(0.5 * (at.wall_K + at.air_K), at.pressure_Pa);
   const double scale = sideways ? at.height : at.length * at.height / (2 * (at.length + at.height));
-  const double along = sideways ? at.height : at.length;
+  const double along = at.length;
   const double grashof_by_dT = standard_gravity * v.density * v.density * scale * scale * scale /
                                (at.air_K * v.viscosity * v.viscosity);
   film_words words;
-  const double forced = f.share[2];
+  const double forced = f.share[2] + f.share[3];
   words.regime = forced > 0.9 ? "forced" : forced > 0.1 ? "mixed" : "natural";
   words.regime += sideways ? ", upright wall" : ", lying wall";
   words.groups = {{"Ra", grashof_by_dT * std::abs(at.wall_K - at.air_K) * v.prandtl()},

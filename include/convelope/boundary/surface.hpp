@@ -25,9 +25,9 @@ class wall_answer {
         reference_(f.reference_temperature.value),
         bits_(f.bits),
         variance_(f.variance),
-        share_{f.share[0], f.share[1], f.share[2]},
         speakers_(&who),
         fluid_(fluid) {
+    for (int i = 0; i < detail::word::slots; ++i) share_[i] = f.share[i];
     const dual<T> q =
         f.coefficient * (dual<T>::variable(wall) - f.reference_temperature);
     flux_ = q.value;

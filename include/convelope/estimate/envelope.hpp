@@ -67,10 +67,10 @@ constexpr auto limit_on(const char* symbol, double low, double high, Group group
   return detail::limit_on_group<Group>{symbol, low, high, group};
 }
 
-/// The range a formula was fitted in: up to seven limits, tested in the caller's own numbers.
+/// The range a formula was fitted in: up to six limits, tested in the caller's own numbers.
 template <class... Limits>
 struct envelope_of {
-  static_assert(sizeof...(Limits) <= detail::word::limits_per_slot, "at most seven limits");
+  static_assert(sizeof...(Limits) <= detail::word::limits_per_slot, "at most six limits");
   static constexpr int count = static_cast<int>(sizeof...(Limits));
   std::tuple<Limits...> limits;
 

@@ -10,13 +10,13 @@ inline namespace v0 {
 enum class side : unsigned char { below, above };
 
 namespace detail::word {
-// Layout of a verdict: three correlations with seven limits each, one fluid with eight, flags.
+// Layout of a verdict: four correlations with six limits each, one fluid with five, flags.
 // A limit takes two bits: below, above.
-inline constexpr int slots = 3;
-inline constexpr int limits_per_slot = 7;
+inline constexpr int slots = 4;
+inline constexpr int limits_per_slot = 6;
 inline constexpr int slot_width = 2 * limits_per_slot;
 inline constexpr int fluid_start = slots * slot_width;
-inline constexpr int fluid_limits = 8;
+inline constexpr int fluid_limits = 5;
 inline constexpr std::uint64_t one = 1;
 inline constexpr std::uint64_t slot_mask = (one << slot_width) - 1;
 inline constexpr std::uint64_t fluid_mask = ((one << (2 * fluid_limits)) - 1) << fluid_start;
@@ -39,7 +39,7 @@ constexpr std::uint64_t of_fluid(int limit, side s) {
 }  // namespace detail::word
 
 /// What is to be said about the support of one number: which limits its inputs crossed, and on
-/// which side, of up to three correlations and of the fluid; and whether an input was NaN or
+/// which side, of up to four correlations and of the fluid; and whether an input was NaN or
 /// infinite. `Bits` is a 64-bit word, or a pack of them, one per lane.
 template <class Bits = std::uint64_t>
 class verdict {

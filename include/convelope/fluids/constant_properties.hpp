@@ -31,7 +31,7 @@ struct constant_properties {
   }
   template <class T>
   CONVELOPE_FUNCTION constexpr bits_t<T> check(const T& temperature_K, const T&) const {
-    return fluid_limit(0, temperature_K, constant<T>(1e-3), constant<T>(unbounded));
+    return fluid_limit(0, temperature_K, constant<T>(1e-3), constant<T>(1e30));
   }
   CONVELOPE_FUNCTION constexpr const fluid_info* info() const { return &detail::constant_info; }
 

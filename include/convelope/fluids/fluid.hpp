@@ -84,20 +84,26 @@ class fluid_state {
   CONVELOPE_FUNCTION constexpr auto prandtl_number() const {
     const property_uncertainty& u = info_->uncertainty;
     return of_variance<kinds::prandtl>(values_.prandtl(),
-                                       u.specific_heat * u.specific_heat +
-                                           u.viscosity * u.viscosity +
-                                           u.conductivity * u.conductivity);
+                                       squared(u.specific_heat) + squared(u.viscosity) +
+                                           squared(u.conductivity),
+                                       u.specific_heat < 0.0 || u.viscosity < 0.0 ||
+                                           u.conductivity < 0.0);
   }
 
  private:
-  template <class K>
-  CONVELOPE_FUNCTION constexpr estimate<K, T> given(const T& x, double relative) const {
-    return of_variance<K>(x, relative * relative);
+  CONVELOPE_FUNCTION static constexpr double squared(double relative) {
+    return relative < 0.0 ? 0.0 : relative * relative;  // not_stated counts as nothing
   }
   template <class K>
-  CONVELOPE_FUNCTION constexpr estimate<K, T> of_variance(const T& x, double variance) const {
-    return estimate<K, T>(x, verdict_bits(), scalar_adaptor<plain_t<T>>::constant(variance),
-                          nullptr, info_);
+  CONVELOPE_FUNCTION constexpr estimate<K, T> given(const T& x, double relative) const {
+    return of_variance<K>(x, squared(relative), relative < 0.0);
+  }
+  template <class K>
+  CONVELOPE_FUNCTION constexpr estimate<K, T> of_variance(const T& x, double variance,
+                                                          bool partly_unstated) const {
+    const std::uint64_t flag = partly_unstated ? detail::word::scatter_not_stated : 0;
+    return estimate<K, T>(x, verdict<bits_t<T>>(bits_t<T>(bits_ | bits_t<T>(flag))),
+                          scalar_adaptor<plain_t<T>>::constant(variance), nullptr, info_);
   }
 
   fluid_values<T> values_;

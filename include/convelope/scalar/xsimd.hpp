@@ -7,6 +7,10 @@
 
 // Lets every formula run on xsimd batches (double lanes). Optional: nothing else includes it.
 
+#if defined(__clang__) && defined(__FAST_MATH__)
+#error "xsimd 8.1 computes exp and log wrongly under clang -ffast-math: leave out one of the three"
+#endif
+
 namespace convelope {
 inline namespace v0 {
 

@@ -8,20 +8,21 @@ namespace convelope {
 inline namespace v0 {
 
 namespace detail {
+using plate_layer_laminar = flat_plate::churchill_ozoe_1973_isothermal_average;
+using plate_layer_turbulent = flat_plate::mixed_average;
+
 /// The plate's boundary layer, laminar to turbulent, for any surface that has one.
 template <class T>
 struct plate_layer {
-  using laminar = flat_plate::churchill_ozoe_1973_isothermal_average;
-  using turbulent = flat_plate::mixed_average;
-
   T Nu;
   plain_t<T> turbulent_share;
 
   /// Laminar up to Re_c; the mixed law from 2 Re_c; between them a quintic hand-over.
   CONVELOPE_FUNCTION constexpr plate_layer(const T& Re, const T& Pr, double Re_c) {
     const T w = math::hand_over(Re, Re_c, 2.0 * Re_c);
-    Nu = math::weighted(laminar::formula(Re, Pr),
-                        turbulent::formula(Re, Pr, T(scalar_adaptor<T>::constant(Re_c))), w);
+    Nu = math::weighted(
+        plate_layer_laminar::formula(Re, Pr),
+        plate_layer_turbulent::formula(Re, Pr, T(scalar_adaptor<T>::constant(Re_c))), w);
     turbulent_share = plain(w);
   }
 };
@@ -31,15 +32,15 @@ struct plate_layer {
 ///
 /// Laminar flat-plate/churchill-ozoe-1973-isothermal-average, then flat-plate/mixed-average, handed
 /// over between Re_c and 2 Re_c. Forced flow only: at rest h is 0. For a plate that also feels
-/// buoyancy take vertical_plate or horizontal_plate.
+/// buoyancy take vertical_wall or horizontal_wall.
 struct plate_along_stream {
   typed<kinds::plate_length> length;
   /// Where the boundary layer turns turbulent; 5e5 on a smooth plate in a quiet stream
   /// (common practice), 1e5 .. 3e6 seen.
   typed<kinds::transition_reynolds> transition = typed<kinds::transition_reynolds>::from_si(5e5);
 
-  using layer_laminar = flat_plate::churchill_ozoe_1973_isothermal_average;
-  using layer_turbulent = flat_plate::mixed_average;
+  using layer_laminar = detail::plate_layer_laminar;
+  using layer_turbulent = detail::plate_layer_turbulent;
   static constexpr const char* name = "plate along a stream";
   static constexpr const speakers& speaks = detail::speakers_of<layer_laminar, layer_turbulent>;
   template <class T>

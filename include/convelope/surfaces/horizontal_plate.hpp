@@ -28,9 +28,11 @@ struct horizontal_wall {
 
   using driving = horizontal_plate_up::raithby_hollands_1998;
   using holding = horizontal_plate_down::raithby_hollands_1998;
-  using forced = flat_plate::churchill_ozoe_1973_isothermal_average;
+  using forced = detail::plate_layer_laminar;
+  using forced_turbulent = detail::plate_layer_turbulent;
   static constexpr const char* name = "horizontal wall";
-  static constexpr const speakers& speaks = detail::speakers_of<driving, holding, forced>;
+  static constexpr const speakers& speaks =
+      detail::speakers_of<driving, holding, forced, forced_turbulent>;
   template <class T>
   using exposure = stream<T>;
 
@@ -64,16 +66,21 @@ struct horizontal_wall {
     const P forced_share = P(plain(Fn) / plain(sum));
     const P holding_share = P(plain(w) * detail::complement(forced_share));
     const P driving_share = P(detail::complement(plain(w)) * detail::complement(forced_share));
+    const P forced_laminar = P(forced_share * detail::complement(layer.turbulent_share));
+    const P forced_tripped = P(forced_share * layer.turbulent_share);
+    const T Re_c = scalar_adaptor<T>::constant(turning.Re);
     const bits_t<T> bits(bits_t<T>(b.bits | l.bits | turning.bits) | f.check(at, p) |
                          detail::sound<T>(wall, ambient, p, s.velocity.si(), gravity.si()) |
                          detail::asked<driving, T>(0, driving_share, Ra, Pr) |
                          detail::asked<holding, T>(1, holding_share, Ra, Pr) |
-                         detail::asked<forced, T>(2, forced_share, Re, Pr));
+                         detail::asked<forced, T>(2, forced_laminar, Re, Pr) |
+                         detail::asked<forced_turbulent, T>(3, forced_tripped, Re, Pr, Re_c));
     return detail::film_of(math::power<2, 7>(sum), v.conductivity, b.metres, ambient, bits,
                            P(driving_share * detail::variance_of<driving, T>() +
                              holding_share * detail::variance_of<holding, T>() +
-                             forced_share * detail::variance_of<forced, T>()),
-                           driving_share, holding_share, forced_share);
+                             forced_laminar * detail::variance_of<forced, T>() +
+                             forced_tripped * detail::variance_of<forced_turbulent, T>()),
+                           driving_share, holding_share, forced_laminar, forced_tripped);
   }
 };
 

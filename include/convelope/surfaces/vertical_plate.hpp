@@ -14,7 +14,8 @@ enum class stream_direction : unsigned char { upward, downward, horizontal };
 /// A vertical isothermal wall in a fluid at rest or in a stream along it.
 ///
 /// Natural: vertical-plate/churchill-chu-laminar-1975, handed over to churchill-chu-1975 between
-/// Ra 1e9 and 1e10. Forced: the boundary layer of plate_along_stream on the height.
+/// Ra 1e9 and 1e10. Forced: the boundary layer of plate_along_stream on the height, or on
+/// the length if the stream is horizontal.
 /// Joined by Nu^6 = F^6 + N^6 + 2 s F^3 N^3. s = 1 (buoyancy assists the stream) is the exponent-3
 /// rule of Churchill 1977, AIChE J. 23, 10-16; s = -7/8 stands for an opposing stream, where the
 /// rule's difference F^3 - N^3 would pass through zero: the least value, 0.79 of either, is at
@@ -24,15 +25,18 @@ enum class stream_direction : unsigned char { upward, downward, horizontal };
 struct vertical_wall {
   typed<kinds::height> height;
   stream_direction direction = stream_direction::upward;
+  /// Along a horizontal stream; not looked at otherwise.
+  typed<kinds::plate_length> length = typed<kinds::plate_length>::from_si(0.0);
   typed<kinds::transition_reynolds> transition = typed<kinds::transition_reynolds>::from_si(5e5);
   typed<kinds::gravity> gravity = standard_gravity;
 
   using natural_laminar = vertical_plate::churchill_chu_laminar_1975;
   using natural_all = vertical_plate::churchill_chu_1975;
-  using forced = flat_plate::churchill_ozoe_1973_isothermal_average;
+  using forced = detail::plate_layer_laminar;
+  using forced_turbulent = detail::plate_layer_turbulent;
   static constexpr const char* name = "vertical wall";
   static constexpr const speakers& speaks =
-      detail::speakers_of<natural_laminar, natural_all, forced>;
+      detail::speakers_of<natural_laminar, natural_all, forced, forced_turbulent>;
   template <class T>
   using exposure = stream<T>;
 
@@ -51,6 +55,8 @@ struct vertical_wall {
                                                const T& wall) const {
     using P = plain_t<T>;
     const detail::usable_length h(height.si());
+    const bool level = direction == stream_direction::horizontal;
+    const detail::usable_length run(level ? length.si() : height.si());
     const detail::usable_transition turning(transition);
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
@@ -65,11 +71,11 @@ struct vertical_wall {
     const T w = math::hand_over(math::power<1, 6>(Ra), 31.622776601683793, 46.415888336127789);
     const T natural_Nu = math::weighted(natural_laminar::formula(Ra, Pr), natural_all::formula(Ra, Pr), w);
 
-    const T Re_signed = T(h.metres * v.density * u / v.viscosity);
+    const T Re_signed = T(run.metres * v.density * u / v.viscosity);
     const T Re = math::smooth_magnitude(Re_signed, detail::least_reynolds);
     const detail::plate_layer<T> layer(Re, Pr, turning.Re);
 
-    const T F3 = math::power<3>(layer.Nu);
+    const T F3 = math::power<3>(T(layer.Nu * (h.metres / run.metres)));  // on the height, too
     const T N3 = math::power<3>(natural_Nu);
     const T Nu6 = T(F3 * F3 + N3 * N3 + 2.0 * assistance(drive.side, Re_signed) * F3 * N3);
 
@@ -78,16 +84,21 @@ struct vertical_wall {
     const P forced_share = P(f6 / (f6 + n6));
     const P turbulent = P(plain(w) * detail::complement(forced_share));
     const P laminar = P(detail::complement(plain(w)) * detail::complement(forced_share));
-    const bits_t<T> bits(bits_t<T>(h.bits | turning.bits) | f.check(at, p) |
+    const P forced_laminar = P(forced_share * detail::complement(layer.turbulent_share));
+    const P forced_tripped = P(forced_share * layer.turbulent_share);
+    const T Re_c = scalar_adaptor<T>::constant(turning.Re);
+    const bits_t<T> bits(bits_t<T>(h.bits | run.bits | turning.bits) | f.check(at, p) |
                          detail::sound<T>(wall, ambient, p, u, gravity.si()) |
                          detail::asked<natural_laminar, T>(0, laminar, Ra, Pr) |
                          detail::asked<natural_all, T>(1, turbulent, Ra, Pr) |
-                         detail::asked<forced, T>(2, forced_share, Re, Pr));
+                         detail::asked<forced, T>(2, forced_laminar, Re, Pr) |
+                         detail::asked<forced_turbulent, T>(3, forced_tripped, Re, Pr, Re_c));
     return detail::film_of(math::power<1, 6>(Nu6), v.conductivity, h.metres, ambient, bits,
                            P(laminar * detail::variance_of<natural_laminar, T>() +
                              turbulent * detail::variance_of<natural_all, T>() +
-                             forced_share * detail::variance_of<forced, T>()),
-                           laminar, turbulent, forced_share);
+                             forced_laminar * detail::variance_of<forced, T>() +
+                             forced_tripped * detail::variance_of<forced_turbulent, T>()),
+                           laminar, turbulent, forced_laminar, forced_tripped);
   }
 
  private:

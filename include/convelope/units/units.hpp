@@ -13,27 +13,18 @@ inline namespace v0 {
 
 /// The unit types of the trade that Boost.Units has no name for, all SI.
 namespace unit_types {
-namespace detail {
-namespace bu = boost::units;
-template <long Length, long Mass, long Time, long Temperature>
-using si_unit = bu::unit<
-    typename bu::derived_dimension<bu::length_base_dimension, Length, bu::mass_base_dimension,
-                                   Mass, bu::time_base_dimension, Time,
-                                   bu::temperature_base_dimension, Temperature>::type,
-    bu::si::system>;
-template <long Length, long Mass, long Time>
-using si_mechanical = bu::unit<
-    typename bu::derived_dimension<bu::length_base_dimension, Length, bu::mass_base_dimension,
-                                   Mass, bu::time_base_dimension, Time>::type,
-    bu::si::system>;
-}  // namespace detail
-
 // clang-format off
-using film_coefficient     = detail::si_unit<0, 1, -3, -1>;  // W/(m2 K)
+using film_coefficient     = boost::units::unit<boost::units::derived_dimension<
+    boost::units::mass_base_dimension, 1, boost::units::time_base_dimension, -3,
+    boost::units::temperature_base_dimension, -1>::type,
+    boost::units::si::system>;                               // W/(m2 K)
 using heat_flux            = boost::units::unit<boost::units::derived_dimension<
     boost::units::mass_base_dimension, 1, boost::units::time_base_dimension, -3>::type,
     boost::units::si::system>;                               // W/m2
-using thermal_conductivity = detail::si_unit<1, 1, -3, -1>;  // W/(m K)
+using thermal_conductivity = boost::units::unit<boost::units::derived_dimension<
+    boost::units::length_base_dimension, 1, boost::units::mass_base_dimension, 1,
+    boost::units::time_base_dimension, -3, boost::units::temperature_base_dimension, -1>::type,
+    boost::units::si::system>;                               // W/(m K)
 using specific_heat        = boost::units::unit<boost::units::derived_dimension<
     boost::units::length_base_dimension, 2, boost::units::time_base_dimension, -2,
     boost::units::temperature_base_dimension, -1>::type,
@@ -48,7 +39,10 @@ using area_resistance      = boost::units::unit<boost::units::derived_dimension<
     boost::units::mass_base_dimension, -1, boost::units::time_base_dimension, 3,
     boost::units::temperature_base_dimension, 1>::type,
     boost::units::si::system>;                               // m2 K/W
-using mass_flux            = detail::si_mechanical<-2, 1, -1>;  // kg/(m2 s)
+using mass_flux            = boost::units::unit<boost::units::derived_dimension<
+    boost::units::length_base_dimension, -2, boost::units::mass_base_dimension, 1,
+    boost::units::time_base_dimension, -1>::type,
+    boost::units::si::system>;                               // kg/(m2 s)
 using mass_flow            = boost::units::unit<boost::units::derived_dimension<
     boost::units::mass_base_dimension, 1, boost::units::time_base_dimension, -1>::type,
     boost::units::si::system>;                               // kg/s
