@@ -98,8 +98,8 @@ std::string add_pair(std::string_view text, request& r) {
     r.quantity = value;
     return {};
   }
-  const bool twice = std::any_of(r.inputs.begin(), r.inputs.end(),
-                                 [&](const pair& p) { return p.key == key; });
+  const bool twice =
+      std::any_of(r.inputs.begin(), r.inputs.end(), [&](const pair& p) { return p.key == key; });
   if (twice) return key + ": given twice";
   r.inputs.push_back({key, value});
   return {};
@@ -159,8 +159,8 @@ outcome answer(const request& r) {
   }
   o.answer = o.entry->evaluate(x.data());
   if (!std::isfinite(o.answer.value)) {
-    o.error = "value: not a finite number for these inputs (" +
-              cv::explain(o.answer.verdict, c) + ")";
+    o.error =
+        "value: not a finite number for these inputs (" + cv::explain(o.answer.verdict, c) + ")";
   }
   return o;
 }

@@ -50,12 +50,13 @@ void against_50_digits(const G& g, const Fluid& f, const state& s) {
       up[j] = exact(at[j]) + (i == j ? exact(step[i]) : exact(0));
       down[j] = exact(at[j]) - (i == j ? exact(step[i]) : exact(0));
     }
-    const exact slope = (flux(g, f, up[0], up[1], up[2], up[3]) -
-                         flux(g, f, down[0], down[1], down[2], down[3])) /
-                        (2 * exact(step[i]));
+    const exact slope =
+        (flux(g, f, up[0], up[1], up[2], up[3]) - flux(g, f, down[0], down[1], down[2], down[3])) /
+        (2 * exact(step[i]));
     const double want = static_cast<double>(slope);
-    const double size = std::fabs(static_cast<double>(value)) /
-                        (i == 1 || i == 2 ? dT : i == 0 ? std::fabs(s.u) + 1e-9 : s.p);
+    const double size = std::fabs(static_cast<double>(value)) / (i == 1 || i == 2 ? dT
+                                                                 : i == 0 ? std::fabs(s.u) + 1e-9
+                                                                          : s.p);
     // Sums that cancel (a density from 34 terms, a segment's end less its start) cost digits.
     CHECK(std::fabs(q.slope[i] - want) <= 1e-9 * (std::fabs(want) + size));
   }
@@ -93,8 +94,8 @@ TEST_CASE("slopes: vertical wall, 50 digits") {
                                  number<kinds::plate_length>(0.9)});
 }
 TEST_CASE("slopes: horizontal wall, 50 digits") {
-  in_air_and_water(horizontal_wall{number<kinds::area_over_perimeter>(0.1),
-                                   number<kinds::plate_length>(0.4)});
+  in_air_and_water(
+      horizontal_wall{number<kinds::area_over_perimeter>(0.1), number<kinds::plate_length>(0.4)});
 }
 TEST_CASE("slopes: ducts, 50 digits") {
   in_air_and_water(round_duct_segment{number<kinds::hydraulic_diameter>(0.04),

@@ -63,13 +63,12 @@ TEST_CASE("surface: the equivalent pair is the tangent, or the secant where q fa
   CHECK(tube.at(wall_temperature(kelvin(T))).flux().si() == doctest::Approx(500.0).epsilon(1e-12));
 
   // A film whose q falls with T_wall.
-  const film<dual<double>> falling{dual<double>::variable(10.0) * -1.0 + 110.0, dual<double>(90.0),
-                                   0, 0.0, {1.0, 0.0, 0.0}};
-  const wall_answer<double> answer(100.0, falling, cylinder_in_crossflow::speaks,
-                                   dry_air{}.info());
+  const film<dual<double>> falling{
+      dual<double>::variable(10.0) * -1.0 + 110.0, dual<double>(90.0), 0, 0.0, {1.0, 0.0, 0.0}};
+  const wall_answer<double> answer(100.0, falling, cylinder_in_crossflow::speaks, dry_air{}.info());
   CHECK(answer.slope().si() == doctest::Approx(100.0 - 10.0));  // h + dh/dT (T - T_ref)
-  const film<dual<double>> steep{dual<double>::variable(10.0) * -20.0 + 300.0, dual<double>(90.0), 0,
-                                 0.0, {1.0, 0.0, 0.0}};
+  const film<dual<double>> steep{
+      dual<double>::variable(10.0) * -20.0 + 300.0, dual<double>(90.0), 0, 0.0, {1.0, 0.0, 0.0}};
   const wall_answer<double> down(100.0, steep, cylinder_in_crossflow::speaks, dry_air{}.info());
   CHECK(down.slope().si() == doctest::Approx(100.0 - 200.0));
   CHECK(down.equivalent().coefficient == 100.0);
@@ -78,8 +77,8 @@ TEST_CASE("surface: the equivalent pair is the tangent, or the secant where q fa
 
 TEST_CASE("surface: at the fluid's own temperature") {
   for (const double u : {0.0, 3.0}) {
-    const auto a = ask(cylinder_in_crossflow{number<kinds::diameter>(0.05)}, dry_air{}, u, 300.0,
-                       300.0);
+    const auto a =
+        ask(cylinder_in_crossflow{number<kinds::diameter>(0.05)}, dry_air{}, u, 300.0, 300.0);
     CHECK(a.flux().si() == 0.0);
     CHECK(a.slope().si() == doctest::Approx(a.coefficient().si()).epsilon(1e-12));
     CHECK(a.equivalent().temperature == 300.0);
@@ -101,13 +100,13 @@ TEST_CASE("surface: scatter is that of the shares") {
 }
 
 TEST_CASE("surface: a person is told which law was left") {
-  const auto a = ask(cylinder_in_crossflow{number<kinds::diameter>(10.0)}, dry_air{}, 200.0, 300.0,
-                     310.0);
+  const auto a =
+      ask(cylinder_in_crossflow{number<kinds::diameter>(10.0)}, dry_air{}, 200.0, 300.0, 310.0);
   const std::string text = explain(a.flux());
   CHECK(text.find("churchill-bernstein-1977 is outside what it was fitted for: Re is above") !=
         std::string::npos);
-  const auto bad = ask(cylinder_in_crossflow{number<kinds::diameter>(-1.0)}, dry_air{}, 2.0, 300.0,
-                       310.0);
+  const auto bad =
+      ask(cylinder_in_crossflow{number<kinds::diameter>(-1.0)}, dry_air{}, 2.0, 300.0, 310.0);
   CHECK(explain(bad.flux()).find("not positive") != std::string::npos);
   CHECK(explain(bad.flux()).find("Inside") == std::string::npos);
 }

@@ -82,9 +82,7 @@ std::vector<double> inputs_from(const correlation_info& c, const std::string& ex
   return x;
 }
 
-bool is_finite(double x) {
-  return scalar_adaptor<double>::bits_where_not_finite(x, 1) == 0;
-}
+bool is_finite(double x) { return scalar_adaptor<double>::bits_where_not_finite(x, 1) == 0; }
 
 }  // namespace
 

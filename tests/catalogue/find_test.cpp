@@ -23,8 +23,7 @@ TEST_CASE("find: one, none, several") {
   CHECK(several.which == nullptr);
   const auto local = catalogue::find<all>("round-duct/gnielinski-laminar-uwt", "Nu_x");
   CHECK(local.how == found::one);
-  CHECK(local.which !=
-        catalogue::find<all>("round-duct/gnielinski-laminar-uwt", "Nu_m").which);
+  CHECK(local.which != catalogue::find<all>("round-duct/gnielinski-laminar-uwt", "Nu_m").which);
 
   CHECK(catalogue::find<all>("cylinder-crossflow/churchill-bernstein-1977", "Nu").how ==
         found::no_such_quantity);

@@ -50,6 +50,18 @@ TEST_CASE("annular gap: geometry factor and conduction against 50 digits") {
   check_value<conduction_limit>(exact(2), 1.0);
 }
 
+// d/((1 - d) ln(1/(1 - d))) = 1 + d/2 + 5 d^2/12 + ..., the coefficients of the Adams-Bashforth
+// method (E. Hairer, S. P. Norsett, G. Wanner, Solving Ordinary Differential Equations I, table
+// III.1.1, from memory). Beyond eta = 1 nothing but the series speaks, so each one shows there.
+TEST_CASE("annular gap: the series of the narrow gap") {
+  const exact d = -0.5_exact;
+  const exact gamma[] = {exact(95) / 288, exact(251) / 720, exact(3) / 8,
+                         exact(5) / 12,   exact(1) / 2,     exact(1)};
+  exact sum = 0;
+  for (const exact& g : gamma) sum = sum * d + g;
+  check_value<conduction_limit>(2 * sum, 1.5);
+}
+
 // As published the laws step; the numbers the documentation names.
 TEST_CASE("annular gap: the published steps") {
   const auto gazley = [](double Ta) { return taylor_gazley::formula(Ta, 0.71); };
@@ -71,7 +83,7 @@ TEST_CASE("annular gap: four sources in air, where their ranges meet") {
 }
 
 TEST_CASE("annular gap: envelopes") {
-  expect_inside<taylor_gazley>(0.0, 0.7);
+  expect_inside<taylor_gazley>(0.0, 1e-3);
   expect_inside<taylor_gazley>(3162.0, 0.7);
   expect_crossed<taylor_gazley>(0, side::below, -1.0, 0.7);
   expect_crossed<taylor_gazley>(0, side::above, above(3162.0), 0.7);
@@ -90,14 +102,14 @@ TEST_CASE("annular gap: envelopes") {
   expect_crossed<geometry>(0, side::above, above(0.353));
   expect_not_finite<geometry>(0.1);
 
-  expect_inside<tachibana_1960>(41.17, 0.7);
+  expect_inside<tachibana_1960>(41.17, 1e-3);
   expect_inside<tachibana_1960>(3162.0, 0.7);
   expect_crossed<tachibana_1960>(0, side::below, below(41.17), 0.7);
   expect_crossed<tachibana_1960>(0, side::above, above(3162.0), 0.7);
   expect_crossed<tachibana_1960>(1, side::below, 100.0, -0.7);
   expect_not_finite<tachibana_1960>(100.0, 0.7);
 
-  expect_inside<aoki_1967>(70.7, 0.7);
+  expect_inside<aoki_1967>(70.7, 1e-3);
   expect_inside<aoki_1967>(447.2, 0.7);
   expect_crossed<aoki_1967>(0, side::below, below(70.7), 0.7);
   expect_crossed<aoki_1967>(0, side::above, above(447.2), 0.7);

@@ -76,6 +76,8 @@ TEST_CASE("explain: the flags") {
       " Another correlation that takes part in it is outside what it was fitted for.";
   CHECK(explain(h(word::of_correlation(1, 0, side::below), 0.01, &record)) ==
         start + another + end + source_text);
+  CHECK(explain(h(word::of_correlation(word::slots - 1, 0, side::above), 0.01, &record)) ==
+        start + another + end + source_text);
   CHECK(explain(h(word::of_correlation(0, 0, side::below))) == start + another + end);
 }
 

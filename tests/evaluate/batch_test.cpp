@@ -57,12 +57,12 @@ std::string error_of(const std::string& line) {
 
 TEST_CASE("batch: good lines, bad lines in between, and on") {
   const auto all = batch(tube + " quantity=Nu_D;Re=20000;Pr=0.7\n" +  //
-                         "no/such Re=1\n" +                            //
-                         tube + " Re=1e9;Pr=0.7\n" +                   //
-                         "\n" +                                        //
-                         tube + " Re=20000\n" +                        //
-                         "annular-gap/aoki-1967 Ta=100;Pr=0.7\r\n" +   //
-                         "  " + tube + "  Re = 20000 ; Pr=0.7 ;\n" +   //
+                         "no/such Re=1\n" +                           //
+                         tube + " Re=1e9;Pr=0.7\n" +                  //
+                         "\n" +                                       //
+                         tube + " Re=20000\n" +                       //
+                         "annular-gap/aoki-1967 Ta=100;Pr=0.7\r\n" +  //
+                         "  " + tube + "  Re = 20000 ; Pr=0.7 ;\n" +  //
                          tube + "\tPr=0.7;Re=20000");
   REQUIRE(all.size() == 7);
   CHECK(all[0]["id"] == tube);
@@ -77,7 +77,7 @@ TEST_CASE("batch: good lines, bad lines in between, and on") {
   CHECK(all[3]["error"] == "Pr: missing; expected Prandtl number");
   CHECK(all[3]["quantity"] == "Nu_D");
   CHECK(all[4]["error"].is_null());
-  CHECK(all[4]["scatter"].is_null());  // not stated
+  CHECK(all[4]["scatter"].is_null());         // not stated
   CHECK(all[5]["value"] == all[0]["value"]);  // blanks don't matter
   CHECK(all[6]["value"] == all[0]["value"]);
 }
@@ -87,8 +87,7 @@ TEST_CASE("batch: each error names the input, its value and what was expected") 
   CHECK(error_of(tube + " Re=1;Pr=1e999") == "Pr: '1e999' is not a finite number");
   CHECK(error_of(tube + " Re=1;Pr=1;Pr=1") == "Pr: given twice");
   CHECK(error_of(tube + " quantity=Nu_D;quantity=Nu_D;Re=1;Pr=1") == "quantity: given twice");
-  CHECK(error_of(tube + " Re=1;Pr=1;Ra=1") == "Ra: not an input of " + tube +
-                                                  "; expected Re, Pr");
+  CHECK(error_of(tube + " Re=1;Pr=1;Ra=1") == "Ra: not an input of " + tube + "; expected Re, Pr");
   CHECK(error_of(tube + " Re") == "'Re': expected key=value");
   CHECK(error_of(tube + " quantity=Nu_x;Re=1;Pr=1") ==
         "quantity: 'Nu_x' is not given by " + tube + "; expected one of Nu_D");

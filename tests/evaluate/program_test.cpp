@@ -7,8 +7,8 @@
 #include "convelope/catalogue/catalogue.hpp"
 #include "run_program.hpp"
 
-using evaluate_test::run;
 using convelope::catalogue::all;
+using evaluate_test::run;
 
 namespace {
 
@@ -34,8 +34,8 @@ TEST_CASE("evaluate: one value with its verdict, scatter and source") {
   CHECK(o.code == 0);
   CHECK(o.error == "");
   // Churchill and Bernstein by hand: 0.3 + 0.62 sqrt(2e4) 0.7^(1/3)/(1.1288...)(...)
-  const double low = 0.62 * std::sqrt(2e4) * std::cbrt(0.7) /
-                     std::pow(1.0 + std::pow(0.4 / 0.7, 2.0 / 3.0), 0.25);
+  const double low =
+      0.62 * std::sqrt(2e4) * std::cbrt(0.7) / std::pow(1.0 + std::pow(0.4 / 0.7, 2.0 / 3.0), 0.25);
   const double Nu = 0.3 + low * std::pow(1.0 + std::pow(2e4 / 282000.0, 0.625), 0.8);
   REQUIRE(o.out.rfind("Nu_D = ", 0) == 0);
   CHECK(std::stod(o.out.substr(7)) == doctest::Approx(Nu).epsilon(1e-10));
@@ -51,8 +51,7 @@ TEST_CASE("evaluate: one value with its verdict, scatter and source") {
 }
 
 TEST_CASE("evaluate: quantity where an id gives several, choices, defaults") {
-  const auto o =
-      run("round-duct/gnielinski-laminar-uwt quantity=Nu_m x_star=0.01 entry=thermal");
+  const auto o = run("round-duct/gnielinski-laminar-uwt quantity=Nu_m x_star=0.01 entry=thermal");
   CHECK(o.code == 0);
   CHECK(o.out.rfind("Nu_m = ", 0) == 0);
   complains("round-duct/gnielinski-laminar-uwt x_star=0.01 entry=thermal",
@@ -70,8 +69,8 @@ TEST_CASE("evaluate: bad arguments end with 2 and one line that says which") {
   complains(tube + " Re=1", "Pr: missing; expected Prandtl number");
   complains(tube + " Re=1 Pr=0.7 x=3", "x: not an input of " + tube + "; expected Re, Pr");
   complains(tube + " Re=1 Pr=0.7 Re=2", "Re: given twice");
-  for (const std::string bad : {"abc", "1,5", "0.7x", "nan", "inf", "-inf", "1e999", "+-1", "", "+",
-                                "0x10", "1e"}) {
+  for (const std::string bad :
+       {"abc", "1,5", "0.7x", "nan", "inf", "-inf", "1e999", "+-1", "", "+", "0x10", "1e"}) {
     complains(tube + " Re=1 Pr=" + bad, "Pr: '" + bad + "' is not a finite number");
   }
   complains(tube + " Re=1 Pr", "'Pr': expected key=value");

@@ -34,8 +34,8 @@ inline outcome run(const std::string& arguments, const std::string& input = {}) 
   REQUIRE(mkdtemp(name.data()) != nullptr);
   const fs::path folder = name;
   std::ofstream(folder / "in", std::ios::binary) << input;
-  const std::string command = "cd '" + name + "' && '" CONVELOPE_PROGRAM "' " + arguments +
-                              " <in >out 2>error";
+  const std::string command =
+      "cd '" + name + "' && '" CONVELOPE_PROGRAM "' " + arguments + " <in >out 2>error";
   const int status = std::system(command.c_str());
   const auto text = [&](const char* file) {
     std::ifstream in(folder / file, std::ios::binary);

@@ -37,9 +37,8 @@ TEST_CASE("faces: what has no array is the same for all, what is not asked for i
   }
   CHECK(faces::evaluate(tube, {.wall_temperature_K = a.wall, .velocity_m_s = a.velocity},
                         {.slope_W_m2K = a.slope}) == status::done);
-  const auto one =
-      tube.at(number<kinds::wall_temperature>(a.wall[3]),
-              exposure<cylinder_in_crossflow, double>(a.velocity[3], 300.0, 101325.0));
+  const auto one = tube.at(number<kinds::wall_temperature>(a.wall[3]),
+                           exposure<cylinder_in_crossflow, double>(a.velocity[3], 300.0, 101325.0));
   CHECK(close(a.slope[3], one.slope().si(), one.slope().si()));
 }
 
@@ -58,14 +57,29 @@ TEST_CASE("faces: arrays of different lengths are refused, whichever it is") {
     faces::inputs in = a.in();
     faces::outputs out = a.out();
     switch (which) {
-      case 0: in.wall_temperature_K = shorter(in.wall_temperature_K); break;
-      case 1: in.velocity_m_s = shorter(in.velocity_m_s); break;
-      case 2: in.stream_temperature_K = shorter(in.stream_temperature_K); break;
-      case 3: in.pressure_Pa = shorter(in.pressure_Pa); break;
-      case 4: out.flux_W_m2 = shorter(out.flux_W_m2); break;
-      case 5: out.slope_W_m2K = shorter(out.slope_W_m2K); break;
-      case 6: out.coefficient_W_m2K = shorter(out.coefficient_W_m2K); break;
-      default: out.verdict = shorter(out.verdict);
+      case 0:
+        in.wall_temperature_K = shorter(in.wall_temperature_K);
+        break;
+      case 1:
+        in.velocity_m_s = shorter(in.velocity_m_s);
+        break;
+      case 2:
+        in.stream_temperature_K = shorter(in.stream_temperature_K);
+        break;
+      case 3:
+        in.pressure_Pa = shorter(in.pressure_Pa);
+        break;
+      case 4:
+        out.flux_W_m2 = shorter(out.flux_W_m2);
+        break;
+      case 5:
+        out.slope_W_m2K = shorter(out.slope_W_m2K);
+        break;
+      case 6:
+        out.coefficient_W_m2K = shorter(out.coefficient_W_m2K);
+        break;
+      default:
+        out.verdict = shorter(out.verdict);
     }
     CHECK(faces::evaluate(tube, in, out) == status::lengths_differ);
     CHECK(a.flux == marked.flux);
@@ -100,9 +114,9 @@ TEST_CASE("faces: an output over another array is refused") {
 }
 
 TEST_CASE("faces: a velocity for a surface that takes none is refused, not ignored") {
-  const auto channel = surface(
-      open_vertical_channel{number<kinds::gap>(0.01), number<kinds::height>(0.3)}, dry_air_fast{},
-      exposure<open_vertical_channel, double>(0.0, 300.0, 101325.0));
+  const auto channel =
+      surface(open_vertical_channel{number<kinds::gap>(0.01), number<kinds::height>(0.3)},
+              dry_air_fast{}, exposure<open_vertical_channel, double>(0.0, 300.0, 101325.0));
   arrays a(5, 6);
   CHECK(faces::evaluate(channel, a.in(), a.out()) == status::no_velocity);
   faces::inputs in = a.in();
@@ -150,10 +164,9 @@ TEST_CASE("faces: many threads on parts of the same arrays") {
       const auto part = [&](auto& a) { return std::span(a).subspan(t * n / parts, n / parts); };
       const faces::inputs in{part(together.wall), part(together.velocity), part(together.stream),
                              part(together.pressure)};
-      found[t] = faces::evaluate(
-          tube, in,
-          {part(together.flux), part(together.slope), part(together.coefficient),
-           part(together.verdict)});
+      found[t] = faces::evaluate(tube, in,
+                                 {part(together.flux), part(together.slope),
+                                  part(together.coefficient), part(together.verdict)});
     });
   }
   for (std::thread& t : threads) t.join();

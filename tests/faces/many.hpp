@@ -42,9 +42,7 @@ struct arrays {
   auto part(A& a) const {
     return std::span(a).subspan(offset_, n_);
   }
-  faces::inputs in() const {
-    return {part(wall), part(velocity), part(stream), part(pressure)};
-  }
+  faces::inputs in() const { return {part(wall), part(velocity), part(stream), part(pressure)}; }
   faces::outputs out() { return {part(flux), part(slope), part(coefficient), part(verdict)}; }
   std::size_t first() const { return offset_; }
   std::size_t end() const { return offset_ + n_; }

@@ -11,8 +11,6 @@
 #include <Eigen/LU>
 #include <boost/math/tools/minima.hpp>
 #include <cmath>
-#include <limits>
-#include <utility>
 
 #include "spectral.hpp"
 

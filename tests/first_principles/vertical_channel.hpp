@@ -9,12 +9,10 @@
 // (1942) 1-28; A. Bar-Cohen, W. M. Rohsenow, J. Heat Transfer 106 (1984) 116-123.
 
 #include <Eigen/Core>
-#include <boost/math/tools/roots.hpp>
 #include <boost/math/tools/toms748_solve.hpp>
 #include <cmath>
 #include <cstdint>
 #include <numbers>
-#include <utility>
 
 #include "spectral.hpp"
 

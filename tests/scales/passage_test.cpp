@@ -28,7 +28,8 @@ passage<Section, Fluid> flow_through(const Section& s, const Fluid& f, double kg
 }  // namespace
 
 TEST_CASE("passage: what the walls give, the fluid takes") {
-  // m cp rise against h_i P_i L (T_i - mean), over short, long and very long segments, hot and cold.
+  // m cp rise against h_i P_i L (T_i - mean), over short, long and very long segments, hot and
+  // cold.
   auto air = flow_through(tube(0.02), dry_air{}, 2e-4, 290.0);
   for (const double length : {1e-9, 1e-4, 0.01, 0.3, 10.0, 1e4}) {
     for (const double other : {280.0, 295.0, 420.0}) {
@@ -42,9 +43,9 @@ TEST_CASE("passage: what the walls give, the fluid takes") {
         heat += one;
         turnover += std::fabs(one);
         // q = h (T_wall - mean)
-        CHECK(s.flux_W_m2[i] == doctest::Approx(s.coefficient_W_m2K[i] *
-                                                (walls[i].temperature_K - s.mean_K))
-                                    .epsilon(1e-12));
+        CHECK(s.flux_W_m2[i] ==
+              doctest::Approx(s.coefficient_W_m2K[i] * (walls[i].temperature_K - s.mean_K))
+                  .epsilon(1e-12));
       }
       CAPTURE(length);
       CHECK(std::fabs(heat - s.heat_W) <= 1e-13 * turnover);
@@ -81,11 +82,11 @@ TEST_CASE("passage: wall at one temperature, analytic") {
   for (const double Re : {50.0, 1500.0, 3000.0, 2e4}) {
     CAPTURE(Re);
     const double kg_s = Re * pi * D * v.viscosity / 4.0;
-    const auto whole = film_of<double>(
-        round_duct_segment{number<kinds::hydraulic_diameter>(D),
-                           number<kinds::distance_from_inlet>(0.0),
-                           number<kinds::distance_from_inlet>(L)},
-        f, kg_s / (v.density * 0.25 * pi * D * D), 330.0, 390.0, 101325.0);
+    const auto whole =
+        film_of<double>(round_duct_segment{number<kinds::hydraulic_diameter>(D),
+                                           number<kinds::distance_from_inlet>(0.0),
+                                           number<kinds::distance_from_inlet>(L)},
+                        f, kg_s / (v.density * 0.25 * pi * D * D), 330.0, 390.0, 101325.0);
     const double ntu = whole.coefficient * pi * D * L / (kg_s * v.specific_heat);
     const double out = 390.0 - 60.0 * std::exp(-ntu);
     const double log_mean = (60.0 - (390.0 - out)) / std::log(60.0 / (390.0 - out));
@@ -211,9 +212,9 @@ TEST_CASE("passage: a patch without perimeter, and no patch that has any") {
 TEST_CASE("passage: derivatives by dual<double, 4> against differences") {
   using D = dual<double, 4>;
   const auto march = []<class T>(const T& a, const T& b, const T& kg_s, const T& inlet) {
-    passage<flat_section, dry_air, T> flow(
-        slot(0.008, 0.25), dry_air{}, typed<kinds::mass_flow, T>::from_si(kg_s),
-        typed<kinds::bulk_temperature, T>::from_si(inlet));
+    passage<flat_section, dry_air, T> flow(slot(0.008, 0.25), dry_air{},
+                                           typed<kinds::mass_flow, T>::from_si(kg_s),
+                                           typed<kinds::bulk_temperature, T>::from_si(inlet));
     T heat = scalar_adaptor<T>::constant(0.0);
     T drop = heat;
     for (int i = 0; i < 5; ++i) {

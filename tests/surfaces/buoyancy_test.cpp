@@ -64,7 +64,8 @@ TEST_CASE("buoyancy: water through its density maximum") {
         doctest::Approx(liquid_water::expansion_slope).epsilon(0.03));
   // 0 and 8 degC: beta of the film is about 0, but the layer at 4 degC is the densest. Its excess
   // over both sides, 1.6e-5/8 * 64 = 1.28e-4, agrees with the tabulated densities
-  // 999.84, 999.97, 999.85 kg/m3 at 0, 4, 8 degC (Kell 1975, J. Chem. Eng. Data 20, 97-105, from memory).
+  // 999.84, 999.97, 999.85 kg/m3 at 0, 4, 8 degC (Kell 1975, J. Chem. Eng. Data 20, 97-105, from
+  // memory).
   const double excess = 1.6e-5 / 8.0 * 64.0;
   CHECK(excess == doctest::Approx((999.97 - 0.5 * (999.84 + 999.85)) / 999.97).epsilon(0.05));
   const auto b = at(water, 281.15, 273.15);

@@ -26,8 +26,8 @@ TEST_CASE("cylinder: no step anywhere, right sign, exact slope") {
 
 TEST_CASE("cylinder: no step over its diameter") {
   for (const double u : {0.0, 0.3, -20.0}) {
-    no_steps_over(
-        [&](double D) { return point_of(of_diameter(D), dry_air{}, u, 300.0, 380.0); }, 1e-6, 10.0);
+    no_steps_over([&](double D) { return point_of(of_diameter(D), dry_air{}, u, 300.0, 380.0); },
+                  1e-6, 10.0);
   }
 }
 

@@ -44,9 +44,7 @@ TEST_CASE("duct: no step anywhere, right sign, exact slope") {
 TEST_CASE("duct: no step over its diameter and along it, from the inlet itself") {
   for (const double u : {0.0, 0.4, -30.0}) {
     no_steps_over(
-        [&](double D) {
-          return point_of(round_segment(D, 0.0, 0.5), dry_air{}, u, 300.0, 380.0);
-        },
+        [&](double D) { return point_of(round_segment(D, 0.0, 0.5), dry_air{}, u, 300.0, 380.0); },
         1e-4, 1.0);
     no_steps_over(
         [&](double x) {
@@ -96,8 +94,8 @@ TEST_CASE("duct: a liquid is corrected by its Prandtl numbers, once") {
   const auto v = liquid_water{}.values(300.0, 1e6);
   const auto w = liquid_water{}.values(350.0, 1e6);
   const double Re = 5e4;
-  const auto fast = ask(round_segment(D, 0.0, 1.0), liquid_water{}, Re * v.kinematic_viscosity() / D,
-                        300.0, 350.0, 1e6);
+  const auto fast = ask(round_segment(D, 0.0, 1.0), liquid_water{},
+                        Re * v.kinematic_viscosity() / D, 300.0, 350.0, 1e6);
   CHECK(fast.coefficient().si() ==
         doctest::Approx(turbulent::formula(Re, v.prandtl(), 50.0, v.prandtl() / w.prandtl(), 1.0) *
                         v.conductivity / D)

@@ -27,8 +27,8 @@ TEST_CASE("plate along a stream: no step anywhere, right sign, exact slope") {
 }
 
 TEST_CASE("plate along a stream: no step over its length") {
-  no_steps_over([](double L) { return point_of(of_length(L), dry_air{}, 20.0, 300.0, 380.0); }, 1e-6,
-                100.0);
+  no_steps_over([](double L) { return point_of(of_length(L), dry_air{}, 20.0, 300.0, 380.0); },
+                1e-6, 100.0);
 }
 
 TEST_CASE("plate along a stream: the bare correlations at both ends of the hand-over") {

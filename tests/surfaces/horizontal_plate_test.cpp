@@ -35,9 +35,7 @@ TEST_CASE("horizontal wall: no step anywhere, right sign, exact slope") {
 TEST_CASE("horizontal wall: no step over its size") {
   for (const double u : {0.0, 0.5, -3.0}) {
     no_steps_over(
-        [&](double L) {
-          return point_of(square_of(L, facing::up), dry_air{}, u, 300.0, 380.0);
-        },
+        [&](double L) { return point_of(square_of(L, facing::up), dry_air{}, u, 300.0, 380.0); },
         1e-4, 30.0);
   }
 }
@@ -74,7 +72,8 @@ TEST_CASE("horizontal wall: cold water turns the sides round") {
 TEST_CASE("horizontal wall: a fast stream leaves the boundary layer alone") {
   const double L = 0.4;
   const auto v = dry_air{}.values(320.0, 101325.0);
-  const double Nu = horizontal_wall::forced::formula(10.0 * L / v.kinematic_viscosity(), v.prandtl());
+  const double Nu =
+      horizontal_wall::forced::formula(10.0 * L / v.kinematic_viscosity(), v.prandtl());
   for (const auto f : {facing::up, facing::down}) {
     const auto a = ask(square_of(L, f), dry_air{}, -10.0, 300.0, 340.0);
     CHECK(a.coefficient().si() == doctest::Approx(Nu * v.conductivity / L).epsilon(5e-3));
@@ -112,6 +111,13 @@ TEST_CASE("horizontal wall: who crossed") {
             .verdict()
             .correlation_crossed(1, 0, side::below));
   CHECK(ask(square_of(0.01, facing::up), dry_air{}, 0.0, 300.0, 340.0).inside());
+}
+
+TEST_CASE("horizontal wall: a turbulent stream is the turbulent law's affair") {
+  const auto a = ask(square_of(3.0, facing::up), dry_air{}, 20.0, 300.0, 340.0);
+  CHECK(a.share(3) > 0.9);
+  CHECK_FALSE(a.verdict().correlation_outside(2));
+  CHECK_FALSE(a.verdict().correlation_outside(3));
 }
 
 TEST_CASE("horizontal wall: bad input is told") {

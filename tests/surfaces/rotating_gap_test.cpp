@@ -40,7 +40,8 @@ TEST_CASE("rotating gap: conduction between cylinders below the first vortices, 
   const double R = 0.1;
   for (const double b : {0.5e-3, 5e-3, 0.1}) {
     // Fourier: q at the inner wall = k dT / (R ln(R_o/R_i)).
-    const double q = dry_air{}.values(320.0, 101325.0).conductivity * 40.0 / (R * std::log1p(b / R));
+    const double q =
+        dry_air{}.values(320.0, 101325.0).conductivity * 40.0 / (R * std::log1p(b / R));
     for (const double Ta : {0.0, 40.0}) {
       const auto a = ask(rotor(R, b), dry_air{}, velocity_at(Ta, R, b), 300.0, 340.0);
       CHECK(a.flux().si() == doctest::Approx(q).epsilon(1e-9));

@@ -82,7 +82,12 @@ template <class At>
 void no_steps(const At& at, double from, double to, int steps, findings& found) {
   std::vector<point> line;
   const auto x_of = [&](int k) { return from + (to - from) * k / steps; };
-  for (int k = 0; k <= steps; ++k) line.push_back(at(x_of(k)));
+  for (int k = 0; k <= steps; ++k) {
+    line.push_back(at(x_of(k)));
+    for (int i = 0; i < point::count; ++i) {
+      found.expect(is_finite(line.back().of(i)), "finite", x_of(k), line.back().of(i));
+    }
+  }
   const auto p = [&](int k) -> const point& { return line[static_cast<std::size_t>(k)]; };
   for (int i = 0; i < point::count; ++i) {
     std::vector<double> second(line.size(), 0.0);
@@ -106,8 +111,7 @@ point point_of(const G& g, const Fluid& f, double u, double stream_K, double wal
                double p = 101325.0) {
   using D = dual<double, 3>;
   const D wall = D::variable(wall_K, 0);
-  const film<D> x =
-      film_of<D>(g, f, D::variable(u, 2), D::variable(stream_K, 1), wall, D(p));
+  const film<D> x = film_of<D>(g, f, D::variable(u, 2), D::variable(stream_K, 1), wall, D(p));
   const D q = x.coefficient * (wall - x.reference_temperature);
   const double by_velocity = x.coefficient.slope[2] * std::sqrt(u * u + least_u * least_u);
   return {x.coefficient.value, q.slope[0], q.slope[1], by_velocity, wall_K - stream_K, stream_K};

@@ -39,9 +39,9 @@ TEST_CASE("sphere: the bare correlations at both ends") {
 
   const double Ra =
       9.80665 / 300.0 * 80.0 * D * D * D / (film.kinematic_viscosity() * film.diffusivity());
-  CHECK(ask(of_diameter(D), dry_air{}, 0.0, 300.0, 380.0).coefficient().si() ==
-        doctest::Approx(natural::formula(Ra, film.prandtl()) * film.conductivity / D)
-            .epsilon(1e-4));
+  CHECK(
+      ask(of_diameter(D), dry_air{}, 0.0, 300.0, 380.0).coefficient().si() ==
+      doctest::Approx(natural::formula(Ra, film.prandtl()) * film.conductivity / D).epsilon(1e-4));
 
   // Whitaker's properties are those of the stream, and so is his conductivity.
   const double F = forced::formula(50.0 * D / stream.kinematic_viscosity(), stream.prandtl(),

@@ -49,9 +49,7 @@ class random_numbers {
   double between(double a, double b) {
     return a + (b - a) * (static_cast<double>(engine_()) / 4294967295.0);
   }
-  double log_between(double a, double b) {
-    return std::exp(between(std::log(a), std::log(b)));
-  }
+  double log_between(double a, double b) { return std::exp(between(std::log(a), std::log(b))); }
   double sign() { return engine_() % 2 == 0 ? 1.0 : -1.0; }
 
  private:

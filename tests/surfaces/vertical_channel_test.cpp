@@ -36,12 +36,12 @@ TEST_CASE("vertical channel: the bare correlation") {
   const double b = 0.01;
   const double H = 0.5;
   const auto v = dry_air{}.values(320.0, 101325.0);
-  const double El = 9.80665 / 300.0 * 40.0 * b * b * b * b / H /
-                    (v.kinematic_viscosity() * v.diffusivity());
+  const double El =
+      9.80665 / 300.0 * 40.0 * b * b * b * b / H / (v.kinematic_viscosity() * v.diffusivity());
   for (const double wall : {340.0, 260.0}) {
     const auto w = dry_air{}.values(0.5 * (300.0 + wall), 101325.0);
-    const double ratio = v.kinematic_viscosity() * v.diffusivity() /
-                         (w.kinematic_viscosity() * w.diffusivity());
+    const double ratio =
+        v.kinematic_viscosity() * v.diffusivity() / (w.kinematic_viscosity() * w.diffusivity());
     const auto a = ask(channel(b, H), dry_air{}, 0.0, 300.0, wall);
     CHECK(a.coefficient().si() ==
           doctest::Approx(natural::formula(El * ratio) * w.conductivity / b).epsilon(1e-9));
@@ -70,8 +70,8 @@ TEST_CASE("vertical channel: the optimum gap") {
     best = per_width;
     const auto v = dry_air{}.values(310.0, 101325.0);
     at_Nu = a.coefficient().si() * b / v.conductivity;
-    at_El = 9.80665 / 300.0 * 20.0 * std::pow(b, 4) / 0.3 /
-            (v.kinematic_viscosity() * v.diffusivity());
+    at_El =
+        9.80665 / 300.0 * 20.0 * std::pow(b, 4) / 0.3 / (v.kinematic_viscosity() * v.diffusivity());
   }
   CHECK(at_El == doctest::Approx(54.3).epsilon(0.01));
   CHECK(at_Nu == doctest::Approx(1.31).epsilon(0.01));

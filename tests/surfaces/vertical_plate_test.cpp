@@ -2,6 +2,7 @@
 #include "convelope/surfaces/vertical_plate.hpp"
 
 #include <algorithm>
+#include <string>
 
 #include "scan.hpp"
 
@@ -49,8 +50,8 @@ TEST_CASE("vertical wall: no step anywhere, right sign, exact slope") {
 
 TEST_CASE("vertical wall: no step over its height") {
   for (const double u : {0.0, 0.5, -3.0}) {
-    no_steps_over([&](double H) { return point_of(of_height(H), dry_air{}, u, 300.0, 380.0); }, 1e-5,
-                  30.0);
+    no_steps_over([&](double H) { return point_of(of_height(H), dry_air{}, u, 300.0, 380.0); },
+                  1e-5, 30.0);
   }
 }
 
@@ -95,6 +96,37 @@ TEST_CASE("vertical wall: a fast stream leaves the boundary layer alone") {
   }
 }
 
+TEST_CASE("vertical wall: a turbulent stream is the turbulent law's affair") {
+  const auto v = dry_air{}.values(320.0, 101325.0);
+  const double Re = 20.0 * 3.0 / v.kinematic_viscosity();
+  const auto a = ask(of_height(3.0), dry_air{}, 20.0, 300.0, 340.0);
+  CHECK(std::string(a.correlation(3)->id) == "flat-plate/mixed-average");
+  CHECK(a.share(3) > 0.95);
+  CHECK(a.share(2) == doctest::Approx(0.0));
+  CHECK_FALSE(a.verdict().correlation_outside(2));
+  CHECK_FALSE(a.verdict().correlation_outside(3));
+  const double Nu = vertical_wall::forced_turbulent::formula(Re, v.prandtl(), 5e5);
+  CHECK(a.coefficient().si() == doctest::Approx(Nu * v.conductivity / 3.0).epsilon(0.02));
+  const auto faster = ask(of_height(3.0), dry_air{}, 700.0, 300.0, 340.0).verdict();
+  CHECK(faster.correlation_crossed(3, 0, side::above));  // Re 1.2e8
+}
+
+TEST_CASE("vertical wall: a crossing stream runs along the length, not the height") {
+  auto g = of_height(0.3, across);
+  g.length = number<kinds::plate_length>(1.2);
+  const auto v = dry_air{}.values(340.0, 101325.0);
+  const double Nu =
+      vertical_wall::forced::formula(5.0 * 1.2 / v.kinematic_viscosity(), v.prandtl());
+  const auto a = ask(g, dry_air{}, 5.0, 300.0, 380.0);
+  CHECK(a.share(2) > 0.97);
+  CHECK(a.coefficient().si() == doctest::Approx(Nu * v.conductivity / 1.2).epsilon(0.01));
+  // Left out, it is told; a stream along the height has no use for it.
+  g.length = number<kinds::plate_length>(0.0);
+  CHECK_FALSE(ask(g, dry_air{}, 5.0, 300.0, 380.0).verdict().possible_input());
+  g.direction = up;
+  CHECK(ask(g, dry_air{}, 5.0, 300.0, 380.0).verdict().possible_input());
+}
+
 TEST_CASE("vertical wall: assisting, opposing, crossing") {
   const double H = 0.3;
   // F = N here within some per cent: found by the shares.
@@ -117,17 +149,16 @@ TEST_CASE("vertical wall: assisting, opposing, crossing") {
   const auto v = dry_air{}.values(340.0, 101325.0);
   double least = 1.0;
   for (double w = 1e-2; w < 20.0; w *= 1.01) {
-    const double forced = vertical_wall::forced::formula(w * H / v.kinematic_viscosity(),
-                                                         v.prandtl()) *
-                          v.conductivity / H;
+    const double forced =
+        vertical_wall::forced::formula(w * H / v.kinematic_viscosity(), v.prandtl()) *
+        v.conductivity / H;
     least = (std::min)(least, h(down, w) / (std::max)(forced, still));
   }
   CHECK(least == doctest::Approx(std::pow(15.0 / 64.0, 1.0 / 6.0)).epsilon(1e-3));
 }
 
 TEST_CASE("vertical wall: still air as an exposure of its own") {
-  const auto wall = surface(of_height(0.3), dry_air{},
-                            still{ambient_temperature(kelvin(300.0))});
+  const auto wall = surface(of_height(0.3), dry_air{}, still{ambient_temperature(kelvin(300.0))});
   const auto a = wall.at(wall_temperature(kelvin(380.0)));
   const auto b = ask(of_height(0.3), dry_air{}, 0.0, 300.0, 380.0);
   CHECK(a.flux().si() == b.flux().si());
@@ -137,13 +168,15 @@ TEST_CASE("vertical wall: still air as an exposure of its own") {
 
 // Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, example 9.2 (from memory): a glass
 // fire screen 0.71 m high at 232 degC in a room at 23 degC. There: Ra 1.813e9 with beta = 1/T_film,
-// Nu 147 by the all-range law, h 7.0 W/(m2 K). Here it stands in the hand-over, between that law and
-// the laminar one (Nu 107), which no smooth surface can follow across the book's step at Ra 1e9.
+// Nu 147 by the all-range law, h 7.0 W/(m2 K). Here it stands in the hand-over, between that law
+// and the laminar one (Nu 107), which no smooth surface can follow across the book's step at Ra
+// 1e9.
 TEST_CASE("vertical wall: worked example, fire screen") {
   const auto v = dry_air{}.values(400.65, 101325.0);
   const double Ra = rayleigh(0.71, 296.15, 505.15) * 296.15 / 400.65;
   CHECK(Ra == doctest::Approx(1.813e9).epsilon(0.03));
-  CHECK(all::formula(Ra, v.prandtl()) * v.conductivity / 0.71 == doctest::Approx(7.0).epsilon(0.01));
+  CHECK(all::formula(Ra, v.prandtl()) * v.conductivity / 0.71 ==
+        doctest::Approx(7.0).epsilon(0.01));
   const auto a = ask(of_height(0.71), dry_air{}, 0.0, 296.15, 505.15);
   CHECK(a.coefficient().si() < 7.0);
   CHECK(a.coefficient().si() > laminar::formula(Ra, v.prandtl()) * v.conductivity / 0.71);

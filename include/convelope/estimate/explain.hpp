@@ -78,9 +78,10 @@ std::string explain(const estimate<K, double>& e) {
   }
   if (v.refused()) add("The value was refused.");
   if (e.correlation() != nullptr) add(explain(v, *e.correlation()));
-  if (v.correlation_outside(1) || v.correlation_outside(2) ||
-      (e.correlation() == nullptr && v.correlation_outside(0))) {
+  for (int slot = e.correlation() == nullptr ? 0 : 1; slot < detail::word::slots; ++slot) {
+    if (!v.correlation_outside(slot)) continue;
     add("Another correlation that takes part in it is outside what it was fitted for.");
+    break;
   }
   if (e.fluid() != nullptr) add(explain(v, *e.fluid()));
   if (v.input_outside()) add("An input was itself outside the envelope it came from.");

@@ -37,10 +37,14 @@ enum class status : unsigned char {
 
 constexpr const char* words(status s) {
   switch (s) {
-    case status::done: return "done";
-    case status::lengths_differ: return "arrays of different lengths; nothing was written";
-    case status::overlapping: return "an output array overlaps another array; nothing was written";
-    case status::no_velocity: break;
+    case status::done:
+      return "done";
+    case status::lengths_differ:
+      return "arrays of different lengths; nothing was written";
+    case status::overlapping:
+      return "an output array overlaps another array; nothing was written";
+    case status::no_velocity:
+      break;
   }
   return "this surface takes no velocity; nothing was written";
 }
@@ -101,8 +105,8 @@ void block(const Surface& s, const inputs& in, const outputs& out, std::size_t i
   if constexpr (requires { exposure.velocity; }) replace(exposure.velocity, in.velocity_m_s);
   replace(exposure.temperature, in.stream_temperature_K);
   replace(exposure.pressure, in.pressure_Pa);
-  const auto wall = typed<kinds::wall_temperature, T>::from_si(
-      access::load(in.wall_temperature_K.data() + i));
+  const auto wall =
+      typed<kinds::wall_temperature, T>::from_si(access::load(in.wall_temperature_K.data() + i));
   const wall_answer<T> a = s.at(wall, exposure);
   if (!out.flux_W_m2.empty()) access::store(a.flux().si(), out.flux_W_m2.data() + i);
   if (!out.slope_W_m2K.empty()) access::store(a.slope().si(), out.slope_W_m2K.data() + i);

@@ -17,9 +17,7 @@ namespace detail {
 template <class Abi>
 struct face_access<std::experimental::simd<double, Abi>> {
   using pack = std::experimental::simd<double, Abi>;
-  static pack load(const double* from) {
-    return pack(from, std::experimental::element_aligned);
-  }
+  static pack load(const double* from) { return pack(from, std::experimental::element_aligned); }
   static void store(const pack& x, double* to) {
     x.copy_to(to, std::experimental::element_aligned);
   }

@@ -37,7 +37,7 @@ struct flux_slope {
 };
 struct area_resistance {
   using unit_type = unit_types::area_resistance;
-  static constexpr const char* symbol = "R";
+  static constexpr const char* symbol = "R_A";
   static constexpr const char* words = "thermal resistance times area";
   static constexpr const char* unit = "m2 K/W";
 };

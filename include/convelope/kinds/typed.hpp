@@ -25,6 +25,19 @@ constexpr bool is_number = std::is_same_v<typename K::unit_type, boost::units::s
 // A plain constant, because compilers recite every line of a concept that does not hold.
 template <class T>
 constexpr bool is_scalar = scalar<T>;
+template <class T>
+using pure_quantity = boost::units::quantity<boost::units::si::dimensionless, T>;
+template <class T>
+constexpr bool is_scalar<pure_quantity<T>> = scalar<T>;
+
+template <class T>
+CONVELOPE_FUNCTION constexpr T number_of(const T& x) {
+  return x;
+}
+template <class T>
+CONVELOPE_FUNCTION constexpr T number_of(const pure_quantity<T>& x) {
+  return x.value();
+}
 }  // namespace detail
 
 /// Anything with a kind: a typed number or an estimate.
@@ -100,7 +113,7 @@ class typed {
 };
 
 /// The way in: `diameter(0.05 * metre)`, `wall_temperature(celsius(60.0))`, `prandtl_number(0.7)`.
-/// Takes a Boost.Units quantity of the kind's SI unit; a dimensionless kind takes a bare number.
+/// Takes a Boost.Units quantity of the kind's SI unit; a dimensionless kind a bare number too.
 template <class K>
 struct gate {
   using kind_type = K;
@@ -120,8 +133,8 @@ struct gate<K> {
 
   template <class T>
     requires(detail::is_scalar<T>)
-  CONVELOPE_FUNCTION constexpr typed<K, T> operator()(const T& number) const {
-    return typed<K, T>::from_si(number);
+  CONVELOPE_FUNCTION constexpr auto operator()(const T& number) const {
+    return typed<K, decltype(detail::number_of(number))>::from_si(detail::number_of(number));
   }
   template <class X>
   void operator()(const X&) const = delete;  // not a number; an integer: write 5.0, not 5

@@ -16,9 +16,12 @@ enum class confinement : unsigned char {
 
 constexpr const char* words(confinement c) {
   switch (c) {
-    case confinement::external: return "external";
-    case confinement::confined: return "confined";
-    case confinement::internal: break;
+    case confinement::external:
+      return "external";
+    case confinement::confined:
+      return "confined";
+    case confinement::internal:
+      break;
   }
   return "internal";
 }
@@ -26,11 +29,11 @@ constexpr const char* words(confinement c) {
 /// The class together with the numbers that decided it.
 struct confinement_answer {
   confinement which;
-  double blockage;           // body height over passage height
-  double layer_over_half;    // boundary-layer thickness at the body's end over half the free gap
+  double blockage;         // body height over passage height
+  double layer_over_half;  // boundary-layer thickness at the body's end over half the free gap
   double blockage_limit;
   double layer_limit;
-  bool possible;             // false: a length was not positive, the answer means nothing
+  bool possible;  // false: a length was not positive, the answer means nothing
 };
 
 /// External, confined or internal, from the blockage and from whether the boundary layers meet.
@@ -49,9 +52,8 @@ inline confinement_answer classify(const typed<kinds::height>& body,
   a.possible = b >= 0.0 && h > b && x.si() > 0.0 && reynolds_at_x > 0.0 && h < unbounded &&
                x.si() < unbounded && reynolds_at_x < unbounded;
   if (!a.possible) return a;
-  const double layer = reynolds_at_x < 5e5
-                           ? 4.91 * x.si() / math::sqrt(reynolds_at_x)
-                           : 0.37 * x.si() * math::power<-1, 5>(reynolds_at_x);
+  const double layer = reynolds_at_x < 5e5 ? 4.91 * x.si() / math::sqrt(reynolds_at_x)
+                                           : 0.37 * x.si() * math::power<-1, 5>(reynolds_at_x);
   a.blockage = b / h;
   a.layer_over_half = layer / (0.5 * (h - b));
   if (a.layer_over_half >= a.layer_limit) {

@@ -16,17 +16,17 @@ struct wall_patch {
 /// What one segment of a passage did. N patches.
 template <class T, std::size_t Patches>
 struct passage_step {
-  T inlet_K;                // bulk
-  T outlet_K;               // bulk
-  T mean_K;                 // bulk mean that the fluxes belong to: q = h (T_wall - mean)
-  T heat_W;                 // from the walls to the fluid
-  T pressure_drop_Pa;       // friction
-  T reynolds;               // on the hydraulic diameter
-  double begin_m;           // behind the inlet
+  T inlet_K;           // bulk
+  T outlet_K;          // bulk
+  T mean_K;            // bulk mean that the fluxes belong to: q = h (T_wall - mean)
+  T heat_W;            // from the walls to the fluid
+  T pressure_drop_Pa;  // friction
+  T reynolds;          // on the hydraulic diameter
+  double begin_m;      // behind the inlet
   double end_m;
-  T thermal_entry_m;        // behind which the temperature profile counts as developed
-  T flux_W_m2[Patches];           // from each patch
-  T coefficient_W_m2K[Patches];   // of each patch
+  T thermal_entry_m;             // behind which the temperature profile counts as developed
+  T flux_W_m2[Patches];          // from each patch
+  T coefficient_W_m2K[Patches];  // of each patch
   bits_t<T> bits[Patches];
   plain_t<T> variance[Patches];
   plain_t<T> turbulent_share;
@@ -60,8 +60,8 @@ class passage {
 
   /// Goes on by one segment of the given length past N wall patches.
   template <std::size_t Patches>
-  CONVELOPE_FUNCTION constexpr passage_step<T, Patches> advance(double length_m,
-                                                          const wall_patch<T> (&walls)[Patches]) {
+  CONVELOPE_FUNCTION constexpr passage_step<T, Patches> advance(
+      double length_m, const wall_patch<T> (&walls)[Patches]) {
     passage_step<T, Patches> step = over(length_m, walls, bulk_);
     step = over(length_m, walls, T(0.5 * (step.inlet_K + step.outlet_K)));
     bulk_ = step.outlet_K;
@@ -73,8 +73,8 @@ class passage {
   // One segment with properties at temperature `at`.
   template <std::size_t Patches>
   CONVELOPE_FUNCTION constexpr passage_step<T, Patches> over(double length_m,
-                                                       const wall_patch<T> (&walls)[Patches],
-                                                       const T& at) const {
+                                                             const wall_patch<T> (&walls)[Patches],
+                                                             const T& at) const {
     passage_step<T, Patches> s{};
     const fluid_values<T> v = fluid_.values(at, pressure_);
     const double D = section_.hydraulic_diameter_m();
@@ -82,8 +82,8 @@ class passage {
     const T m = math::smooth_magnitude(mass_flow_, 1e-12);
     const T u = T(m / (v.density * section_.area_m2()));
     const duct_flow<T> in_duct{typed<kinds::mean_velocity, T>::from_si(u),
-                            typed<kinds::bulk_temperature, T>::from_si(at),
-                            typed<kinds::pressure, T>::from_si(pressure_)};
+                               typed<kinds::bulk_temperature, T>::from_si(at),
+                               typed<kinds::pressure, T>::from_si(pressure_)};
     const auto geometry = section_.segment(from_inlet_, from_inlet_ + length_m);
 
     T conductance = scalar_adaptor<T>::constant(0.0);  // W/K of all patches
@@ -116,11 +116,10 @@ class passage {
     s.begin_m = from_inlet_;
     s.end_m = from_inlet_ + length_m;
     // Laminar 0.05 Re Pr Dh, turbulent 10 Dh (common practice for the latter).
-    s.thermal_entry_m = T(D * math::weighted(
-                                  friction::entrance_length_laminar_temperature::formula(
-                                      s.reynolds, v.prandtl()),
-                                  T(scalar_adaptor<T>::constant(10.0)),
-                                  math::hand_over(s.reynolds, 2300.0, 4000.0)));
+    s.thermal_entry_m = T(
+        D * math::weighted(
+                friction::entrance_length_laminar_temperature::formula(s.reynolds, v.prandtl()),
+                T(scalar_adaptor<T>::constant(10.0)), math::hand_over(s.reynolds, 2300.0, 4000.0)));
     s.pressure_drop_Pa = T(Section::darcy(s.reynolds) * (0.5 * length_m / D) * v.density * u * u);
     return s;
   }

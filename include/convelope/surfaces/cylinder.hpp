@@ -37,8 +37,7 @@ struct cylinder_in_crossflow {
     const T Pr = v.prandtl();
 
     const T Re = detail::rounded_reynolds(v, s.velocity.si(), d.metres);
-    const T Ra =
-        detail::buoyancy<T>(f, v, wall, ambient, p, d.metres, gravity.si()).Ra;
+    const T Ra = detail::buoyancy<T>(f, v, wall, ambient, p, d.metres, gravity.si()).Ra;
     constexpr double conduction_4 = 0.3 * 0.3 * 0.3 * 0.3;
     const T F4 = T(math::power<4>(forced::formula(Re, Pr)) - conduction_4);
     const T N4 = math::power<4>(natural::formula(Ra, Pr));

@@ -65,15 +65,15 @@ CONVELOPE_FUNCTION constexpr film<T> duct_film(const Fluid& f, const duct_flow<T
   const T L_over_D = adaptor::constant(end.metres / d.metres);
   const P turbulent_share = plain(w);
   const P laminar_share = complement(turbulent_share);
-  const bits_t<T> bits(bits_t<T>(d.bits | l.bits | end.bits | start_bits) | f.check(bulk, p) |
-                       f.check(wall, p) | sound<T>(wall, bulk, p, s.velocity.si()) |
-                       Laminar::template verdict_bits<T>(0, laminar_share, Re, Pr, L_over_D) |
-                       asked<turbulent, T>(1, turbulent_share, Re, Pr, L_over_D, Pr_ratio,
-                                           T_ratio));
-  return film_of(math::weighted(Nu_laminar, Nu_turbulent, w), v.conductivity, d.metres, bulk, bits,
-                 P(laminar_share * variance_of<laminar, T>() +
-                   turbulent_share * variance_of<turbulent, T>()),
-                 laminar_share, turbulent_share);
+  const bits_t<T> bits(
+      bits_t<T>(d.bits | l.bits | end.bits | start_bits) | f.check(bulk, p) | f.check(wall, p) |
+      sound<T>(wall, bulk, p, s.velocity.si()) |
+      Laminar::template verdict_bits<T>(0, laminar_share, Re, Pr, L_over_D) |
+      asked<turbulent, T>(1, turbulent_share, Re, Pr, L_over_D, Pr_ratio, T_ratio));
+  return film_of(
+      math::weighted(Nu_laminar, Nu_turbulent, w), v.conductivity, d.metres, bulk, bits,
+      P(laminar_share * variance_of<laminar, T>() + turbulent_share * variance_of<turbulent, T>()),
+      laminar_share, turbulent_share);
 }
 
 struct laminar_round_duct {
@@ -86,8 +86,8 @@ struct laminar_round_duct {
   CONVELOPE_FUNCTION static constexpr bits_t<T> verdict_bits(int slot, const plain_t<T>& share,
                                                              const T& Re, const T& Pr,
                                                              const T& L_over_D) {
-    return asked<correlation, T>(slot, share, T(L_over_D / (Re * Pr)),
-                                 round_duct::entry::combined, Pr);
+    return asked<correlation, T>(slot, share, T(L_over_D / (Re * Pr)), round_duct::entry::combined,
+                                 Pr);
   }
 };
 
@@ -148,8 +148,8 @@ struct plate_channel_segment {
   template <fluid Fluid, class T>
   CONVELOPE_FUNCTION constexpr film<T> film_at(const Fluid& f, const duct_flow<T>& s,
                                                const T& wall) const {
-    return detail::duct_film<detail::laminar_plate_channel>(f, s, wall, 2.0 * gap.si(),
-                                                            begin.si(), end.si());
+    return detail::duct_film<detail::laminar_plate_channel>(f, s, wall, 2.0 * gap.si(), begin.si(),
+                                                            end.si());
   }
 };
 

@@ -15,7 +15,7 @@ struct film {
   T coefficient;            // W/(m2 K)
   T reference_temperature;  // K
   bits_t<T> bits;
-  plain_t<T> variance;      // square of the relative scatter
+  plain_t<T> variance;                    // square of the relative scatter
   plain_t<T> share[detail::word::slots];  // what each of the geometry's correlations contributes
 };
 
@@ -61,13 +61,12 @@ template <class C, class T, class... X>
 CONVELOPE_FUNCTION constexpr bits_t<T> asked(int slot, const plain_t<T>& share, const X&... x) {
   using bits = bits_t<T>;
   using P = plain_t<T>;
-  const bits crossed = C::with_input_kinds([&]<class... K>() {
-    return C::envelope.template check<P, K...>(without_slope<P>(x)...);
-  });
+  const bits crossed = C::with_input_kinds(
+      [&]<class... K>() { return C::envelope.template check<P, K...>(without_slope<P>(x)...); });
   bits all(crossed << (slot * word::slot_width));
   if (C::scatter < 0.0) all = bits(all | bits(word::scatter_not_stated));
-  return bits(all & scalar_adaptor<P>::bits_where(
-                        share > scalar_adaptor<P>::constant(heard_from), ~std::uint64_t{0}));
+  return bits(all & scalar_adaptor<P>::bits_where(share > scalar_adaptor<P>::constant(heard_from),
+                                                  ~std::uint64_t{0}));
 }
 
 template <fluid Fluid>

@@ -37,8 +37,8 @@ struct rotating_inner_cylinder {
     const T Pr = v.prandtl();
 
     const T eta = adaptor::constant(r.metres / (r.metres + b.metres));
-    const T Ta = T(detail::rounded_reynolds(v, s.velocity.si(), b.metres) *
-                   math::sqrt(b.metres / r.metres));
+    const T Ta =
+        T(detail::rounded_reynolds(v, s.velocity.si(), b.metres) * math::sqrt(b.metres / r.metres));
     const T above = math::larger(Ta, adaptor::constant(101.0));
     // The upper law, drawn out below Ta 100 by its own square root.
     const T turning = T(rotation::formula(above, Pr) * math::sqrt(T(Ta / above)));

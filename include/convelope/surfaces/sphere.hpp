@@ -40,8 +40,7 @@ struct sphere_in_stream {
     const T Pr_stream = at_stream.prandtl();
     const T mu_ratio = T(at_stream.viscosity / at_wall.viscosity);
     const T Pr_film = at_film.prandtl();
-    const T Ra =
-        detail::buoyancy<T>(f, at_film, wall, ambient, p, d.metres, gravity.si()).Ra;
+    const T Ra = detail::buoyancy<T>(f, at_film, wall, ambient, p, d.metres, gravity.si()).Ra;
     // Each on its own conductivity, brought to that of the film state.
     const T Nu_F = T(forced::formula(Re, Pr_stream, mu_ratio) *
                      (at_stream.conductivity / at_film.conductivity));

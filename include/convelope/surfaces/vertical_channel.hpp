@@ -32,8 +32,7 @@ struct open_vertical_channel {
     const T& p = s.pressure.si();
     const T at = T(0.5 * (wall + ambient));
     const fluid_values<T> v = f.values(at, p);
-    const T Ra =
-        detail::buoyancy<T>(f, v, wall, ambient, p, b.metres, gravity.si()).Ra;
+    const T Ra = detail::buoyancy<T>(f, v, wall, ambient, p, b.metres, gravity.si()).Ra;
     const T El = T(Ra * (b.metres / h.metres));
 
     const P all = scalar_adaptor<P>::constant(1.0);

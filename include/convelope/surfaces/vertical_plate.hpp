@@ -18,7 +18,7 @@ enum class stream_direction : unsigned char { upward, downward, horizontal };
 /// the length if the stream is horizontal.
 /// Joined by Nu^6 = F^6 + N^6 + 2 s F^3 N^3. s = 1 (buoyancy assists the stream) is the exponent-3
 /// rule of Churchill 1977, AIChE J. 23, 10-16; s = -7/8 stands for an opposing stream, where the
-/// rule's difference F^3 - N^3 would pass through zero: the least value, 0.79 of either, is at
+/// rule's difference F^3 - N^3 would pass through zero: the least, 0.785 of the greater, is near
 /// F = N (a choice of this library, on the safe side of common practice); s = sqrt(2) - 1 for a
 /// horizontal stream equals the exponent-4 rule at F = N. s passes smoothly through the change of
 /// side at T_wall = T_stream.
@@ -43,11 +43,10 @@ struct vertical_wall {
   template <fluid Fluid, class T>
   CONVELOPE_FUNCTION constexpr film<T> film_at(const Fluid& f, const still<T>& s,
                                                const T& wall) const {
-    const auto calm = typed<kinds::free_stream_velocity, T>::from_si(
-        scalar_adaptor<T>::constant(0.0));
-    const auto far =
-        typed<kinds::free_stream_temperature, T>::from_si(s.temperature.si());
-    return film_at(f, stream<T>{calm, far, s.pressure}, wall);
+    const auto calm =
+        typed<kinds::free_stream_velocity, T>::from_si(scalar_adaptor<T>::constant(0.0));
+    const auto ambient = typed<kinds::free_stream_temperature, T>::from_si(s.temperature.si());
+    return film_at(f, stream<T>{calm, ambient, s.pressure}, wall);
   }
 
   template <fluid Fluid, class T>
@@ -69,7 +68,8 @@ struct vertical_wall {
     const T& Ra = drive.Ra;
     // Handed over in Ra^(1/6), which the formulas share: 31.6 is 1e9, 46.4 is 1e10.
     const T w = math::hand_over(math::power<1, 6>(Ra), 31.622776601683793, 46.415888336127789);
-    const T natural_Nu = math::weighted(natural_laminar::formula(Ra, Pr), natural_all::formula(Ra, Pr), w);
+    const T natural_Nu =
+        math::weighted(natural_laminar::formula(Ra, Pr), natural_all::formula(Ra, Pr), w);
 
     const T Re_signed = T(run.metres * v.density * u / v.viscosity);
     const T Re = math::smooth_magnitude(Re_signed, detail::least_reynolds);
