@@ -39,8 +39,8 @@ void with_slope(benchmark::State& state) {
     T sum(0.0);
     T slopes(0.0);
     for (std::size_t i = 0; i < Re.size(); i += std::size_t(scalar_adaptor<T>::lanes)) {
-      const auto y = correlation_type::formula(dual<T>::variable(load<T>(&Re[i])),
-                                               dual<T>(T(0.71)));
+      const auto y =
+          correlation_type::formula(dual<T>::variable(load<T>(&Re[i])), dual<T>(T(0.71)));
       sum += y.value;
       slopes += y.slope[0];
     }

@@ -68,9 +68,9 @@ void ours(benchmark::State& state) {
   std::vector<double> slope(walls().size());
   std::vector<std::uint64_t> verdicts(walls().size());
   for (auto _ : state) {
-    const auto done = faces::evaluate<T>(
-        tube, {.wall_temperature_K = walls()},
-        {.flux_W_m2 = q, .slope_W_m2K = slope, .verdict = verdicts});
+    const auto done =
+        faces::evaluate<T>(tube, {.wall_temperature_K = walls()},
+                           {.flux_W_m2 = q, .slope_W_m2K = slope, .verdict = verdicts});
     benchmark::DoNotOptimize(done);
     benchmark::ClobberMemory();
   }

@@ -25,8 +25,7 @@ double typed_numbers(double velocity) {
   const auto mu = viscosity(viscosity_Pa_s * units::pascal_second);
   const auto k = conductivity(conductivity_W_mK * units::watt_per_metre_kelvin);
   const auto D = diameter(diameter_m * units::metre);
-  const auto Re =
-      reynolds(rho, free_stream_velocity(velocity * units::metre_per_second), D, mu);
+  const auto Re = reynolds(rho, free_stream_velocity(velocity * units::metre_per_second), D, mu);
   const auto Nu = nusselt_of<diameter>(formula::formula(Re.si(), prandtl_number(0.71).si()));
   return film_coefficient(Nu, k, D).si();
 }

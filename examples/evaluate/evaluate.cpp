@@ -60,8 +60,8 @@ int one(int argc, char** argv) {
   std::cout << (crossed.empty() ? "Inside every stated range." : crossed) << '\n'
             << "Scatter: " << convelope::catalogue::detail::scatter_text(c.scatter) << '\n'
             << "Properties: " << convelope::words(c.state_at) << '\n'
-            << "Source: " << c.source->authors << ' ' << c.source->year << ", "
-            << c.source->where << " (constants " << convelope::words(c.source->constants) << ")\n";
+            << "Source: " << c.source->authors << ' ' << c.source->year << ", " << c.source->where
+            << " (constants " << convelope::words(c.source->constants) << ")\n";
   if (*c.source->note != 0) std::cout << "Note: " << c.source->note << '\n';
   return 0;
 }

@@ -9,6 +9,6 @@
 #define CONVELOPE_VERSION \
   (CONVELOPE_VERSION_MAJOR * 10000 + CONVELOPE_VERSION_MINOR * 100 + CONVELOPE_VERSION_PATCH)
 #define CONVELOPE_VERSION_AT_LEAST(major, minor, patch) \
-  (CONVELOPE_VERSION >= (major) * 10000 + (minor) * 100 + (patch))
+  (CONVELOPE_VERSION >= (major)*10000 + (minor)*100 + (patch))
 
 #endif

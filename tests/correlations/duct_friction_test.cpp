@@ -51,9 +51,7 @@ exact churchill(double Re, double e) {
 }
 
 template <class F>
-constexpr bool becomes_darcy = requires(const F& f) {
-  friction::to_darcy(f);
-};
+constexpr bool becomes_darcy = requires(const F& f) { friction::to_darcy(f); };
 
 template <class C>
 double number(double Re, double e) {

@@ -52,7 +52,7 @@ const char* unit_text() {
   if (is(metre)) return "m";
   if (is(metre_per_second)) return "m/s";
   if (is(si::acceleration())) return "m/s2";
-  if (is(pascal)) return "Pa";
+  if (is(pascals)) return "Pa";
   if (is(kilogram_per_cubic_metre)) return "kg/m3";
   if (is(joule_per_kilogram_kelvin)) return "J/(kg K)";
   if (is(watt_per_metre_kelvin)) return "W/(m K)";

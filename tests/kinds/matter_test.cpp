@@ -17,7 +17,7 @@ TEST_CASE("properties through their gates") {
   CHECK(viscosity(1e-3 * units::pascal_second).si() == 1e-3);
   CHECK(expansion_coefficient(-6e-5 * units::per_kelvin).si() == -6e-5);
   CHECK(surface_tension(0.072 * units::newton_per_metre).si() == 0.072);
-  CHECK(pressure(101325.0 * units::pascal).si() == 101325.0);
+  CHECK(pressure(101325.0 * units::pascals).si() == 101325.0);
 }
 
 TEST_CASE("standard gravity: 9.80665 m/s2 (3rd CGPM, 1901; ISO 80000-3)") {

@@ -1,4 +1,4 @@
-// names: film_coefficient, temperature_base_dimension
+// names: film_coefficient, mass_base_dimension
 #include "convelope/groups/film.hpp"
 
 using namespace convelope;

@@ -3,7 +3,8 @@
 
 using namespace convelope;
 
-constexpr auto cold = free_stream_temperature(celsius(20.0)); constexpr auto hot = wall_temperature(celsius(60.0));
+constexpr auto cold = free_stream_temperature(celsius(20.0));
+constexpr auto hot = wall_temperature(celsius(60.0));
 #ifdef TWIN
 const auto t = film_between(hot, cold);
 #else

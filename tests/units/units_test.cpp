@@ -25,7 +25,7 @@ namespace static_test {
 using namespace convelope::units;
 static_assert(same_unit(metre, si::meter));
 static_assert(same_unit(metre_per_second, si::meter / si::second));
-static_assert(same_unit(pascal, si::newton / (si::meter * si::meter)));
+static_assert(same_unit(pascals, si::newton / (si::meter * si::meter)));
 static_assert(same_unit(kelvin_difference, si::kelvin));
 static_assert(same_unit(radian_per_second, si::radian / si::second));
 static_assert(same_unit(kilogram_per_cubic_metre, si::kilogram / si::cubic_meter));

@@ -28,8 +28,7 @@ class wall_answer {
         speakers_(&who),
         fluid_(fluid) {
     for (int i = 0; i < detail::word::slots; ++i) share_[i] = f.share[i];
-    const dual<T> q =
-        f.coefficient * (dual<T>::variable(wall) - f.reference_temperature);
+    const dual<T> q = f.coefficient * (dual<T>::variable(wall) - f.reference_temperature);
     flux_ = q.value;
     slope_ = q.slope[0];
   }
@@ -94,7 +93,8 @@ class wall_answer {
 template <wall_geometry G, fluid Fluid, class E>
 class wall_surface {
  public:
-  CONVELOPE_FUNCTION constexpr wall_surface(const G& geometry, const Fluid& fluid, const E& exposure)
+  CONVELOPE_FUNCTION constexpr wall_surface(const G& geometry, const Fluid& fluid,
+                                            const E& exposure)
       : geometry_(geometry), fluid_(fluid), exposure_(exposure) {}
 
   /// The answer at a wall temperature: `tube.at(wall_temperature(kelvin(350.0)))`.
@@ -129,8 +129,9 @@ class wall_surface {
 
 /// surface(cylinder_in_crossflow{diameter(0.05 * metre)}, dry_air{}, stream{...})
 template <wall_geometry G, fluid Fluid, class E>
-CONVELOPE_FUNCTION constexpr wall_surface<G, Fluid, E> surface(const G& geometry, const Fluid& fluid,
-                                                           const E& exposure) {
+CONVELOPE_FUNCTION constexpr wall_surface<G, Fluid, E> surface(const G& geometry,
+                                                               const Fluid& fluid,
+                                                               const E& exposure) {
   return wall_surface<G, Fluid, E>(geometry, fluid, exposure);
 }
 

@@ -63,8 +63,7 @@ inline std::string to_json(const correlation_info& c) {
   }
   s += "],\"scatter\":" +
        (c.scatter < 0.0 ? std::string("null") : convelope::detail::short_number(c.scatter)) +
-       ",\"properties\":" + quoted(words(c.state_at)) +
-       ",\"source\":" +
+       ",\"properties\":" + quoted(words(c.state_at)) + ",\"source\":" +
        quoted(std::string(c.source->authors) + " " + std::to_string(c.source->year) + ", " +
               c.source->where) +
        ",\"constants\":" + quoted(words(c.source->constants)) +
@@ -105,10 +104,9 @@ inline std::string to_markdown(const correlation_info& c) {
          convelope::detail::range_text(c.limits[i]);
   }
   if (c.limit_count == 0) s += "none stated";
-  s += "\n- Scatter: " + detail::scatter_text(c.scatter) +
-       "\n- Properties: " + words(c.state_at) + "\n- Source: " + c.source->authors + " " +
-       std::to_string(c.source->year) + ", " + c.source->where + "\n- Constants: " +
-       words(c.source->constants) + "\n";
+  s += "\n- Scatter: " + detail::scatter_text(c.scatter) + "\n- Properties: " + words(c.state_at) +
+       "\n- Source: " + c.source->authors + " " + std::to_string(c.source->year) + ", " +
+       c.source->where + "\n- Constants: " + words(c.source->constants) + "\n";
   if (*c.source->note != 0) s += std::string("- Note: ") + c.source->note + "\n";
   return s + "\n";
 }

@@ -7,10 +7,9 @@ namespace convelope {
 inline namespace v0 {
 
 namespace detail {
-inline constexpr reference own_numbers{"the host", 0, "numbers given by the host",
-                                       known::recalled};
-inline constexpr fluid_info constant_info{"constant properties", &own_numbers, nullptr, 0,
-                                          {0.0, 0.0, 0.0, 0.0, 0.0}};
+inline constexpr reference own_numbers{"the host", 0, "numbers given by the host", known::recalled};
+inline constexpr fluid_info constant_info{
+    "constant properties", &own_numbers, nullptr, 0, {0.0, 0.0, 0.0, 0.0, 0.0}};
 }  // namespace detail
 
 /// A fluid whose properties the host gives as constants. No envelope of its own: any T > 0.

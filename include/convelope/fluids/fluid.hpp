@@ -43,13 +43,13 @@ concept fluid = requires(const Fluid& f, const double& x) {
 
 /// The verdict bits of limit number i of a fluid: low <= x <= high.
 template <class T>
-CONVELOPE_FUNCTION constexpr bits_t<T> fluid_limit(int i, const T& x, const std::type_identity_t<T>& low,
+CONVELOPE_FUNCTION constexpr bits_t<T> fluid_limit(int i, const T& x,
+                                                   const std::type_identity_t<T>& low,
                                                    const std::type_identity_t<T>& high) {
   using adaptor = scalar_adaptor<T>;
-  return bits_t<T>(
-      adaptor::bits_where(!(x >= low), detail::word::of_fluid(i, side::below)) |
-      adaptor::bits_where(!(x <= high), detail::word::of_fluid(i, side::above)) |
-      adaptor::bits_where_not_finite(x, detail::word::not_finite));
+  return bits_t<T>(adaptor::bits_where(!(x >= low), detail::word::of_fluid(i, side::below)) |
+                   adaptor::bits_where(!(x <= high), detail::word::of_fluid(i, side::above)) |
+                   adaptor::bits_where_not_finite(x, detail::word::not_finite));
 }
 
 /// A fluid at one state: every property as an estimate that carries the fluid's verdict.
@@ -83,11 +83,10 @@ class fluid_state {
   }
   CONVELOPE_FUNCTION constexpr auto prandtl_number() const {
     const property_uncertainty& u = info_->uncertainty;
-    return of_variance<kinds::prandtl>(values_.prandtl(),
-                                       squared(u.specific_heat) + squared(u.viscosity) +
-                                           squared(u.conductivity),
-                                       u.specific_heat < 0.0 || u.viscosity < 0.0 ||
-                                           u.conductivity < 0.0);
+    return of_variance<kinds::prandtl>(
+        values_.prandtl(),
+        squared(u.specific_heat) + squared(u.viscosity) + squared(u.conductivity),
+        u.specific_heat < 0.0 || u.viscosity < 0.0 || u.conductivity < 0.0);
   }
 
  private:

@@ -15,10 +15,10 @@ template <class H, template <class> class Nu, class... A>
 constexpr bool makes_film = false;
 template <class H, template <class> class Nu, class T>
 constexpr bool makes_film<H, Nu, boost::units::quantity<typename H::unit_type, T>> = true;
-template <class H, template <class> class Nu, class N, class K, class L>
+template <class H, template <class> class Nu, class Number, class K, class L>
   requires(is_length<L>)
-constexpr bool makes_film<H, Nu, N, K, L> =
-    is_of_kind<N, Nu<typename L::kind_type>> && is_of_kind<K, kinds::conductivity>;
+constexpr bool makes_film<H, Nu, Number, K, L> =
+    is_of_kind<Number, Nu<typename L::kind_type>> && is_of_kind<K, kinds::conductivity>;
 
 // One call operator, so that a compiler's complaint lists one candidate.
 template <class H, template <class> class Nu>
@@ -36,9 +36,9 @@ struct film_gate {
   }
 
  private:
-  template <class N, class K, class L>
-  CONVELOPE_FUNCTION static constexpr auto from_nusselt(const N& nu, const K& k, const L& l) {
-    using T = number_type<N, K, L>;
+  template <class Number, class K, class L>
+  CONVELOPE_FUNCTION static constexpr auto from_nusselt(const Number& nu, const K& k, const L& l) {
+    using T = number_type<Number, K, L>;
     return carried<H, T>(T(T(nu.si()) * k.si() / l.si()), nu, k, l);  // h = Nu k / L
   }
 };

@@ -82,8 +82,7 @@ inline constexpr gate<kinds::expansion_coefficient> expansion_coefficient{};
 inline constexpr gate<kinds::surface_tension> surface_tension{};
 inline constexpr gate<kinds::gravity> gravity{};
 /// 9.80665 m/s2, the conventional value (3rd CGPM, 1901).
-inline constexpr typed<kinds::gravity> standard_gravity =
-    typed<kinds::gravity>::from_si(9.80665);
+inline constexpr typed<kinds::gravity> standard_gravity = typed<kinds::gravity>::from_si(9.80665);
 
 }  // namespace v0
 }  // namespace convelope

@@ -18,9 +18,9 @@ inline namespace v0 {
 /// (see scalar/dual.hpp, scalar/std_simd.hpp, scalar/xsimd.hpp).
 template <class T>
 struct scalar_adaptor {
-  using plain = T;              // the number without its derivatives
-  using working = T;            // the type formulas run on
-  using bits = std::uint64_t;   // one verdict word per lane
+  using plain = T;             // the number without its derivatives
+  using working = T;           // the type formulas run on
+  using bits = std::uint64_t;  // one verdict word per lane
   static constexpr int lanes = 1;
 
   CONVELOPE_FUNCTION static constexpr const plain& value(const T& x) { return x; }

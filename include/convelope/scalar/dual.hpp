@@ -17,9 +17,9 @@ constexpr bool is_dual<dual<T, Size>> = true;
 
 // A number that has no derivative where a dual<T, N> is expected.
 template <class S, class T>
-concept constant_beside = std::is_same_v<S, T> || std::is_arithmetic_v<S> ||
-                          (!is_dual<S> && std::is_constructible_v<T, S> &&
-                           !std::is_constructible_v<S, T>);
+concept constant_beside =
+    std::is_same_v<S, T> || std::is_arithmetic_v<S> ||
+    (!is_dual<S> && std::is_constructible_v<T, S> && !std::is_constructible_v<S, T>);
 
 template <class T, class S>
 CONVELOPE_FUNCTION constexpr decltype(auto) as(const S& s) {
@@ -195,12 +195,10 @@ struct scalar_adaptor<dual<T, Size>> {
   CONVELOPE_FUNCTION static D power(const D& x) {
     const T v = math::power<P, Q>(x.value);
     if constexpr (Q == 1 && P >= 1) {  // no division: right at x = 0 too
-      return scaled(x, v, [&] {
-        return T(math::power<P - 1>(x.value) * detail::as<T>(double(P)));
-      });
-    } else {
       return scaled(x, v,
-                    [&] { return T(v / x.value * math::detail::ratio<T>(P, Q)); });
+                    [&] { return T(math::power<P - 1>(x.value) * detail::as<T>(double(P))); });
+    } else {
+      return scaled(x, v, [&] { return T(v / x.value * math::detail::ratio<T>(P, Q)); });
     }
   }
   template <class Mask>

@@ -113,11 +113,10 @@ template <class A, class... Rest>
   requires(!std::is_void_v<A>)
 struct common_scalar<A, void, Rest...> : common_scalar<A, Rest...> {};
 template <class A, class B>
-constexpr bool second_holds_first = std::is_floating_point_v<A>
-                                        ? !std::is_floating_point_v<B> || (sizeof(A) < sizeof(B))
-                                        : !std::is_floating_point_v<B> &&
-                                              std::is_constructible_v<B, A> &&
-                                              !std::is_constructible_v<A, B>;
+constexpr bool second_holds_first =
+    std::is_floating_point_v<A> ? !std::is_floating_point_v<B> || (sizeof(A) < sizeof(B))
+                                : !std::is_floating_point_v<B> && std::is_constructible_v<B, A> &&
+                                      !std::is_constructible_v<A, B>;
 template <class A, class B, class... Rest>
   requires(!std::is_void_v<A> && !std::is_void_v<B>)
 struct common_scalar<A, B, Rest...> {

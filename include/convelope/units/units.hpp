@@ -69,7 +69,7 @@ inline constexpr boost::units::si::mass_density kilogram_per_cubic_metre{};
 inline constexpr boost::units::si::dynamic_viscosity pascal_second{};
 inline constexpr boost::units::si::length metre{};
 inline constexpr boost::units::si::velocity metre_per_second{};
-inline constexpr boost::units::si::pressure pascal{};
+inline constexpr boost::units::si::pressure pascals{};  // plural: some hosts define pascal
 inline constexpr boost::units::si::angular_velocity radian_per_second{};
 inline constexpr boost::units::si::temperature kelvin_difference{};
 }  // namespace units

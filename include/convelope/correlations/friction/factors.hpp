@@ -11,15 +11,15 @@ namespace friction {
 // Darcy: dp = f_D (L/Dh) rho u^2/2. Fanning: f_F = tau_w/(rho u^2/2) = f_D/4. The two kinds don't
 // mix; these are the only way across. Typed numbers or estimates; an estimate keeps its verdict.
 
-template <measures<kinds::fanning_friction> F>
-CONVELOPE_FUNCTION constexpr auto to_darcy(const F& f) {
-  using T = typename F::value_type;
+template <measures<kinds::fanning_friction> Factor>
+CONVELOPE_FUNCTION constexpr auto to_darcy(const Factor& f) {
+  using T = typename Factor::value_type;
   return detail::carried<kinds::darcy_friction, T>(T(f.si() * scalar_adaptor<T>::constant(4.0)), f);
 }
 
-template <measures<kinds::darcy_friction> F>
-CONVELOPE_FUNCTION constexpr auto to_fanning(const F& f) {
-  using T = typename F::value_type;
+template <measures<kinds::darcy_friction> Factor>
+CONVELOPE_FUNCTION constexpr auto to_fanning(const Factor& f) {
+  using T = typename Factor::value_type;
   return detail::carried<kinds::fanning_friction, T>(T(f.si() * scalar_adaptor<T>::constant(0.25)),
                                                      f);
 }

@@ -22,8 +22,8 @@ CONVELOPE_FUNCTION constexpr T log10(const T& x) {
 /// How many derivatives a scalar carries: dual<dual<T>> two.
 template <class T>
 constexpr int orders = 0;
-template <class T, int N>
-constexpr int orders<dual<T, N>> = orders<T> + (N > 0 ? 1 : 0);
+template <class T, int Order>
+constexpr int orders<dual<T, Order>> = orders<T> + (Order > 0 ? 1 : 0);
 
 /// The root y of an implicit law by a fixed number of Newton steps `next(y, a, b)`: on plain
 /// numbers, then one on T for every order of derivatives it carries, which makes them exact.
@@ -43,11 +43,11 @@ CONVELOPE_FUNCTION constexpr T root(const T& a, const T& b, Start start, Next ne
 }
 
 /// (a^N + b^N)^(1/N) for a, b >= 0, not both 0, where a^N alone would leave the range of T.
-template <int N, class T>
+template <int Order, class T>
 CONVELOPE_FUNCTION constexpr T joined_in_range(const T& a, const T& b) {
   const T most = math::larger(a, b);
   const T ratio = T(math::smaller(a, b) / most);
-  return T(most * math::power<1, N>(T(1.0 + math::power<N>(ratio))));
+  return T(most * math::power<1, Order>(T(1.0 + math::power<Order>(ratio))));
 }
 
 }  // namespace detail::friction_law

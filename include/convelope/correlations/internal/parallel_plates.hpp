@@ -94,9 +94,10 @@ struct shah_1975_uwt_local
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& x_star) {
-    const T near = T(1.233 * power<-1, 3>(x_star) + 0.4);
-    const T far = T(7.541 + 6.874 * exp(T(-0.488 * log(T(1000.0 * x_star)) - 245.0 * x_star)));
-    return select(x_star <= T(0.001), near, far);
+    const T at_inlet = T(1.233 * power<-1, 3>(x_star) + 0.4);
+    const T downstream =
+        T(7.541 + 6.874 * exp(T(-0.488 * log(T(1000.0 * x_star)) - 245.0 * x_star)));
+    return select(x_star <= T(0.001), at_inlet, downstream);
   }
 };
 
@@ -117,8 +118,9 @@ struct shah_1975_uwt_mean
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& x_star) {
     const T layer = T(1.849 * power<-1, 3>(x_star));
-    const T far = T(7.541 + 0.0235 / x_star);
-    return select(x_star <= T(0.0005), layer, select(x_star <= T(0.006), T(layer + 0.6), far));
+    const T downstream = T(7.541 + 0.0235 / x_star);
+    return select(x_star <= T(0.0005), layer,
+                  select(x_star <= T(0.006), T(layer + 0.6), downstream));
   }
 };
 
@@ -142,8 +144,10 @@ struct shah_1975_uhf_local
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& x_star) {
     const T layer = T(1.490 * power<-1, 3>(x_star));
-    const T far = T(8.235 + 8.68 * exp(T(-0.506 * log(T(1000.0 * x_star)) - 164.0 * x_star)));
-    return select(x_star <= T(0.0002), layer, select(x_star <= T(0.001), T(layer + 0.4), far));
+    const T downstream =
+        T(8.235 + 8.68 * exp(T(-0.506 * log(T(1000.0 * x_star)) - 164.0 * x_star)));
+    return select(x_star <= T(0.0002), layer,
+                  select(x_star <= T(0.001), T(layer + 0.4), downstream));
   }
 };
 
@@ -164,8 +168,8 @@ struct shah_1975_uhf_mean
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& x_star) {
     const T layer = T(2.236 * power<-1, 3>(x_star));
-    const T far = T(8.235 + 0.0364 / x_star);
-    return select(x_star <= T(0.001), layer, select(x_star <= T(0.01), T(layer + 0.9), far));
+    const T downstream = T(8.235 + 0.0364 / x_star);
+    return select(x_star <= T(0.001), layer, select(x_star <= T(0.01), T(layer + 0.9), downstream));
   }
 };
 

@@ -69,9 +69,10 @@ struct shah_1975_uwt_local
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& x_star) {
-    const T near = T(1.077 * power<-1, 3>(x_star) - 0.7);
-    const T far = T(3.657 + 6.874 * exp(T(-0.488 * log(T(1000.0 * x_star)) - 57.2 * x_star)));
-    return select(x_star <= T(0.001), near, far);
+    const T at_inlet = T(1.077 * power<-1, 3>(x_star) - 0.7);
+    const T downstream =
+        T(3.657 + 6.874 * exp(T(-0.488 * log(T(1000.0 * x_star)) - 57.2 * x_star)));
+    return select(x_star <= T(0.001), at_inlet, downstream);
   }
 };
 
@@ -94,9 +95,9 @@ struct shah_1975_uwt_mean
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& x_star) {
     const T layer = T(1.615 * power<-1, 3>(x_star));
-    const T far = T(3.657 + 0.0499 / x_star);
+    const T downstream = T(3.657 + 0.0499 / x_star);
     return select(x_star <= T(0.005), T(layer - 0.7),
-                  select(x_star < T(0.03), T(layer - 0.2), far));
+                  select(x_star < T(0.03), T(layer - 0.2), downstream));
   }
 };
 
@@ -119,9 +120,9 @@ struct shah_1975_uhf_local
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& x_star) {
     const T layer = T(1.302 * power<-1, 3>(x_star));
-    const T far = T(4.364 + 8.68 * exp(T(-0.506 * log(T(1000.0 * x_star)) - 41.0 * x_star)));
+    const T downstream = T(4.364 + 8.68 * exp(T(-0.506 * log(T(1000.0 * x_star)) - 41.0 * x_star)));
     return select(x_star <= T(5e-5), T(layer - 1.0),
-                  select(x_star <= T(0.0015), T(layer - 0.5), far));
+                  select(x_star <= T(0.0015), T(layer - 0.5), downstream));
   }
 };
 

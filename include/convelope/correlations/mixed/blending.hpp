@@ -41,8 +41,8 @@ struct churchill_assisting_1977
   static constexpr reference source{"S. W. Churchill", 1977, "AIChE J. 23, 10-16", known::quoted,
                                     "7/2 and 4 are remembered; a textbook says 3 to 4"};
   static constexpr auto envelope =
-      within(limit_on("Nu_F", 0.0, unbounded, [](auto F, auto, auto) { return F; }),
-             limit_on("Nu_N", 0.0, unbounded, [](auto, auto N, auto) { return N; }),
+      within(limit_on("Nu_F", 0.0, unbounded, [](auto forced, auto, auto) { return forced; }),
+             limit_on("Nu_N", 0.0, unbounded, [](auto, auto natural, auto) { return natural; }),
              limit<blending_exponent>(3.0, 4.0));
   static constexpr double scatter = not_stated;
   static constexpr state_rule state_at = state_rule::none;
@@ -68,11 +68,12 @@ struct churchill_opposing_1977
   static constexpr reference source{"S. W. Churchill", 1977, "AIChE J. 23, 10-16", known::quoted,
                                     "stated for Ri below 0.1 or above 10"};
   static constexpr auto envelope = within(
-      limit_on("Nu_F", 0.0, unbounded, [](auto F, auto, auto) { return F; }),
-      limit_on("Nu_N", 0.0, unbounded, [](auto, auto N, auto) { return N; }),
+      limit_on("Nu_F", 0.0, unbounded, [](auto forced, auto, auto) { return forced; }),
+      limit_on("Nu_N", 0.0, unbounded, [](auto, auto natural, auto) { return natural; }),
       limit<blending_exponent>(3.0, 4.0),
-      limit_on("smaller over larger Nu", 0.0, 1.0 / 3.0,
-               [](auto F, auto N, auto) { return math::smaller(F, N) / math::larger(F, N); }));
+      limit_on("smaller over larger Nu", 0.0, 1.0 / 3.0, [](auto forced, auto natural, auto) {
+        return math::smaller(forced, natural) / math::larger(forced, natural);
+      }));
   static constexpr double scatter = not_stated;
   static constexpr state_rule state_at = state_rule::none;
 
