@@ -15,7 +15,7 @@ constexpr const char* usage =
 
 void list(const std::string& part) {
   namespace cat = convelope::catalogue;
-  cat::filter<cat::all>(part, [](const cat::entry& e) {
+  cat::filter(evaluate::catalogue(), part, [](const cat::entry& e) {
     const convelope::correlation_info& c = *e.info;
     std::cout << c.id << "  quantity=" << c.quantity;
     for (int i = 0; i < c.input_count; ++i) {
@@ -78,11 +78,13 @@ int main(int argc, char** argv) {
   }
   if (first == "--batch" && argc == 2) return batch();
   if (first == "--json" && argc == 2) {
-    std::cout << cat::to_json<cat::all>();
+    std::cout << cat::to_json(evaluate::catalogue());
     return 0;
   }
   if (first == "--markdown" && argc == 2) {
-    std::cout << cat::to_markdown<cat::all>();
+    std::cout << "# Catalogue\n\nWritten by `evaluate --markdown`; a test keeps it current. Keys in "
+                 "`code` are what a batch line takes.\n\n"
+              << cat::to_markdown(evaluate::catalogue());
     return 0;
   }
   if (first == "--help") {

@@ -46,7 +46,7 @@ std::string keys_of(const cv::correlation_info& c) {
 
 std::string quantities_of(std::string_view id) {
   std::string s;
-  cat::filter<cat::all>(id, [&](const cat::entry& e) {
+  cat::filter(catalogue(), id, [&](const cat::entry& e) {
     if (id == e.info->id) s += (s.empty() ? "" : ", ") + std::string(e.info->quantity);
   });
   return s;
@@ -130,7 +130,7 @@ std::string parse_line(std::string_view given, request& r) {
 
 outcome answer(const request& r) {
   outcome o;
-  const cat::match m = cat::find<cat::all>(r.id, r.quantity);
+  const cat::match m = cat::find(catalogue(), r.id, r.quantity);
   if (m.how == cat::found::no_such_id) {
     o.error = "id: '" + r.id + "' is not in the catalogue; `evaluate --list` shows all";
     return o;

@@ -1,11 +1,11 @@
 #ifndef CONVELOPE_EXAMPLES_EVALUATE_LINE_HPP
 #define CONVELOPE_EXAMPLES_EVALUATE_LINE_HPP
 
+#include <span>
 #include <string>
 #include <string_view>
 #include <vector>
 
-#include "convelope/catalogue/catalogue.hpp"
 #include "convelope/catalogue/text.hpp"
 
 // One request, from words to an answer. Errors are sentences that name the input, its value and
@@ -29,6 +29,9 @@ struct outcome {
   convelope::catalogue::answer answer{};
   std::string error;  // empty if there is an answer
 };
+
+/// The whole catalogue. The one place that reads every correlation's header.
+std::span<const convelope::catalogue::entry> catalogue();
 
 /// "key=value" pairs to a request; returns a sentence on the first bad pair, else "".
 std::string add_pair(std::string_view text, request& r);

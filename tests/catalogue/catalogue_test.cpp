@@ -153,7 +153,7 @@ TEST_CASE("catalogue: ids, quantities and keys are the agreed ones, and the exam
   for (const expected::row& row : expected::rows) {
     CAPTURE(std::string(row.id));
     CAPTURE(std::string(row.quantity));
-    const catalogue::match m = catalogue::find<all>(row.id, row.quantity);
+    const catalogue::match m = catalogue::find(all::entries, row.id, row.quantity);
     REQUIRE(m.how == catalogue::found::one);
     const correlation_info& c = *m.which->info;
     // No other keys, none that may be left out missing; a required one may be optional here.
@@ -173,7 +173,7 @@ TEST_CASE("catalogue: ids, quantities and keys are the agreed ones, and the exam
 }
 
 TEST_CASE("catalogue: an entry answers as the correlation itself") {
-  const auto m = catalogue::find<all>("cylinder-crossflow/churchill-bernstein-1977");
+  const auto m = catalogue::find(all::entries, "cylinder-crossflow/churchill-bernstein-1977");
   REQUIRE(m.how == catalogue::found::one);
   const double x[catalogue::most_inputs] = {2e4, 0.7};
   const auto a = m.which->evaluate(x);

@@ -12,44 +12,44 @@ using catalogue::all;
 using catalogue::found;
 
 TEST_CASE("find: one, none, several") {
-  const auto one = catalogue::find<all>("cylinder-crossflow/churchill-bernstein-1977");
+  const auto one = catalogue::find(all::entries, "cylinder-crossflow/churchill-bernstein-1977");
   CHECK(one.how == found::one);
   CHECK(std::string(one.which->info->quantity) == "Nu_D");
-  CHECK(catalogue::find<all>("cylinder-crossflow/churchill-bernstein-1977", "Nu_D").which ==
+  CHECK(catalogue::find(all::entries, "cylinder-crossflow/churchill-bernstein-1977", "Nu_D").which ==
         one.which);
 
-  const auto several = catalogue::find<all>("round-duct/gnielinski-laminar-uwt");
+  const auto several = catalogue::find(all::entries, "round-duct/gnielinski-laminar-uwt");
   CHECK(several.how == found::several_quantities);
   CHECK(several.which == nullptr);
-  const auto local = catalogue::find<all>("round-duct/gnielinski-laminar-uwt", "Nu_x");
+  const auto local = catalogue::find(all::entries, "round-duct/gnielinski-laminar-uwt", "Nu_x");
   CHECK(local.how == found::one);
-  CHECK(local.which != catalogue::find<all>("round-duct/gnielinski-laminar-uwt", "Nu_m").which);
+  CHECK(local.which != catalogue::find(all::entries, "round-duct/gnielinski-laminar-uwt", "Nu_m").which);
 
-  CHECK(catalogue::find<all>("cylinder-crossflow/churchill-bernstein-1977", "Nu").how ==
+  CHECK(catalogue::find(all::entries, "cylinder-crossflow/churchill-bernstein-1977", "Nu").how ==
         found::no_such_quantity);
   for (const char* id : {"", "cylinder-crossflow", "cylinder-crossflow/churchill-bernstein-197",
                          "Cylinder-crossflow/churchill-bernstein-1977"}) {
-    CHECK(catalogue::find<all>(id).how == found::no_such_id);
-    CHECK(catalogue::find<all>(id, "Nu_D").which == nullptr);
+    CHECK(catalogue::find(all::entries, id).how == found::no_such_id);
+    CHECK(catalogue::find(all::entries, id, "Nu_D").which == nullptr);
   }
 }
 
 TEST_CASE("find: every entry finds itself, also at compile time") {
   for (const catalogue::entry& e : all::entries) {
-    CHECK(catalogue::find<all>(e.info->id, e.info->quantity).which == &e);
+    CHECK(catalogue::find(all::entries, e.info->id, e.info->quantity).which == &e);
   }
-  static_assert(catalogue::find<all>("sphere/whitaker-1972").how == found::one);
+  static_assert(catalogue::find(all::entries, "sphere/whitaker-1972").how == found::one);
 }
 
 TEST_CASE("filter: by a part of the id") {
   int spheres = 0;
-  catalogue::filter<all>("sphere/", [&](const catalogue::entry& e) {
+  catalogue::filter(all::entries, "sphere/", [&](const catalogue::entry& e) {
     CHECK(std::string(e.info->id).rfind("sphere/", 0) == 0);
     ++spheres;
   });
   CHECK(spheres >= 5);
   int everything = 0;
-  catalogue::filter<all>("", [&](const catalogue::entry&) { ++everything; });
+  catalogue::filter(all::entries, "", [&](const catalogue::entry&) { ++everything; });
   CHECK(everything == all::count);
-  catalogue::filter<all>("no such thing", [&](const catalogue::entry&) { FAIL("found one"); });
+  catalogue::filter(all::entries, "no such thing", [&](const catalogue::entry&) { FAIL("found one"); });
 }

@@ -1,6 +1,8 @@
 // One correlation from the command line, and the lists.
 #include <doctest/doctest.h>
 
+#include <fstream>
+#include <iterator>
 #include <nlohmann/json.hpp>
 #include <string>
 
@@ -103,4 +105,11 @@ TEST_CASE("evaluate: the catalogue as documents") {
   const auto page = run("--markdown");
   CHECK(page.code == 0);
   CHECK(has(page.out, "### " + tube + " (Nu_D)"));
+}
+
+TEST_CASE("evaluate: docs/catalogue.md is what the program writes") {
+  std::ifstream file(CONVELOPE_SOURCE_DIR "/docs/catalogue.md");
+  const std::string stored((std::istreambuf_iterator<char>(file)), {});
+  CHECK_MESSAGE(stored == run("--markdown").out,
+                "write it anew: evaluate --markdown > docs/catalogue.md");
 }

@@ -1,6 +1,7 @@
 #ifndef CONVELOPE_CATALOGUE_FIND_HPP
 #define CONVELOPE_CATALOGUE_FIND_HPP
 
+#include <span>
 #include <string_view>
 
 #include "convelope/catalogue/entry.hpp"
@@ -17,13 +18,13 @@ struct match {
   const entry* which;
 };
 
-/// The entry of an id, and of a quantity where the id gives several ("" if it gives just one).
-template <class List>
-constexpr match find(std::string_view id, std::string_view quantity = {}) {
+/// The entry of an id in a list (`find(all::entries, id)`), and of a quantity where the id gives several ("" if it gives just one).
+constexpr match find(std::span<const entry> entries, std::string_view id,
+                     std::string_view quantity = {}) {
   const entry* first = nullptr;
   bool known_id = false;
   int fitting = 0;
-  for (const entry& e : List::entries) {
+  for (const entry& e : entries) {
     if (id != e.info->id) continue;
     known_id = true;
     if (!quantity.empty() && quantity != e.info->quantity) continue;
@@ -37,9 +38,9 @@ constexpr match find(std::string_view id, std::string_view quantity = {}) {
 }
 
 /// Calls f(entry) for each entry whose id contains `part`.
-template <class List, class Use>
-constexpr void filter(std::string_view part, Use use) {
-  for (const entry& e : List::entries) {
+template <class Use>
+constexpr void filter(std::span<const entry> entries, std::string_view part, Use use) {
+  for (const entry& e : entries) {
     if (std::string_view(e.info->id).find(part) != std::string_view::npos) use(e);
   }
 }

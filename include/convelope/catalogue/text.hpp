@@ -72,11 +72,10 @@ inline std::string to_json(const correlation_info& c) {
 }
 
 /// The whole list as a JSON array, one correlation a line.
-template <class List>
-std::string to_json() {
+inline std::string to_json(std::span<const entry> entries) {
   std::string s = "[\n";
-  for (int i = 0; i < List::count; ++i) {
-    s += to_json(*List::entries[i].info) + (i + 1 < List::count ? ",\n" : "\n");
+  for (const entry& e : entries) {
+    s += to_json(*e.info) + (&e == &entries.back() ? "\n" : ",\n");
   }
   return s + "]\n";
 }
@@ -112,10 +111,9 @@ inline std::string to_markdown(const correlation_info& c) {
 }
 
 /// The whole list as Markdown.
-template <class List>
-std::string to_markdown() {
+inline std::string to_markdown(std::span<const entry> entries) {
   std::string s;
-  for (const entry& e : List::entries) s += to_markdown(*e.info);
+  for (const entry& e : entries) s += to_markdown(*e.info);
   return s;
 }
 
