@@ -82,9 +82,10 @@ int main(int argc, char** argv) {
     return 0;
   }
   if (first == "--markdown" && argc == 2) {
-    std::cout << "# Catalogue\n\nWritten by `evaluate --markdown`; a test keeps it current. Keys in "
-                 "`code` are what a batch line takes.\n\n"
-              << cat::to_markdown(evaluate::catalogue());
+    std::cout
+        << "# Catalogue\n\nWritten by `evaluate --markdown`; a test keeps it current. Keys in "
+           "`code` are what a batch line takes.\n\n"
+        << cat::to_markdown(evaluate::catalogue());
     return 0;
   }
   if (first == "--help") {

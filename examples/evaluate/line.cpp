@@ -80,8 +80,8 @@ void add_crossed(const cv::limit_info& l, bool below, bool above, std::string& s
   if (!below && !above) return;
   const double bound = below ? l.low : l.high;
   s += (s.empty() ? "" : ",") +
-       cat::detail::quoted(std::string(l.symbol) + (below ? " below " : " above ") +
-                           shortest(bound));
+       cat::detail::json_string(std::string(l.symbol) + (below ? " below " : " above ") +
+                                shortest(bound));
 }
 
 }  // namespace
@@ -166,7 +166,7 @@ outcome answer(const request& r) {
 }
 
 std::string to_json_line(const request& r, const outcome& o) {
-  using cat::detail::quoted;
+  using cat::detail::json_string;
   const bool ok = o.error.empty();
   const std::string quantity = o.entry != nullptr ? o.entry->info->quantity : r.quantity;
   std::string crossed;
@@ -178,12 +178,12 @@ std::string to_json_line(const request& r, const outcome& o) {
     }
   }
   const bool scatter_known = ok && o.answer.scatter >= 0.0;
-  return "{\"id\":" + quoted(r.id) + ",\"quantity\":" + quoted(quantity) +
+  return "{\"id\":" + json_string(r.id) + ",\"quantity\":" + json_string(quantity) +
          ",\"value\":" + (ok ? shortest(o.answer.value) : "null") +
          ",\"inside\":" + (ok ? (o.answer.verdict.inside() ? "true" : "false") : "null") +
          ",\"crossed\":[" + crossed + "]" +
          ",\"scatter\":" + (scatter_known ? shortest(o.answer.scatter) : "null") +
-         ",\"error\":" + (ok ? "null" : quoted(o.error)) + "}";
+         ",\"error\":" + (ok ? "null" : json_string(o.error)) + "}";
 }
 
 }  // namespace evaluate

@@ -15,15 +15,17 @@ TEST_CASE("find: one, none, several") {
   const auto one = catalogue::find(all::entries, "cylinder-crossflow/churchill-bernstein-1977");
   CHECK(one.how == found::one);
   CHECK(std::string(one.which->info->quantity) == "Nu_D");
-  CHECK(catalogue::find(all::entries, "cylinder-crossflow/churchill-bernstein-1977", "Nu_D").which ==
-        one.which);
+  CHECK(
+      catalogue::find(all::entries, "cylinder-crossflow/churchill-bernstein-1977", "Nu_D").which ==
+      one.which);
 
   const auto several = catalogue::find(all::entries, "round-duct/gnielinski-laminar-uwt");
   CHECK(several.how == found::several_quantities);
   CHECK(several.which == nullptr);
   const auto local = catalogue::find(all::entries, "round-duct/gnielinski-laminar-uwt", "Nu_x");
   CHECK(local.how == found::one);
-  CHECK(local.which != catalogue::find(all::entries, "round-duct/gnielinski-laminar-uwt", "Nu_m").which);
+  CHECK(local.which !=
+        catalogue::find(all::entries, "round-duct/gnielinski-laminar-uwt", "Nu_m").which);
 
   CHECK(catalogue::find(all::entries, "cylinder-crossflow/churchill-bernstein-1977", "Nu").how ==
         found::no_such_quantity);
@@ -51,5 +53,6 @@ TEST_CASE("filter: by a part of the id") {
   int everything = 0;
   catalogue::filter(all::entries, "", [&](const catalogue::entry&) { ++everything; });
   CHECK(everything == all::count);
-  catalogue::filter(all::entries, "no such thing", [&](const catalogue::entry&) { FAIL("found one"); });
+  catalogue::filter(all::entries, "no such thing",
+                    [&](const catalogue::entry&) { FAIL("found one"); });
 }

@@ -56,7 +56,7 @@ TEST_CASE("json: parses, and says of each entry what the entry says") {
 TEST_CASE("json: text with quotes, backslashes and control characters") {
   for (const std::string& text :
        {std::string("a \"b\" \\ c"), std::string("tab\tline\nend\x01"), std::string("Ž 50 °C")}) {
-    const json j = json::parse(catalogue::detail::quoted(text), nullptr, false);
+    const json j = json::parse(catalogue::detail::json_string(text), nullptr, false);
     REQUIRE(j.is_string());
     CHECK(j.get<std::string>() == text);
   }

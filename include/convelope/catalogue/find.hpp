@@ -18,7 +18,8 @@ struct match {
   const entry* which;
 };
 
-/// The entry of an id in a list (`find(all::entries, id)`), and of a quantity where the id gives several ("" if it gives just one).
+/// The entry of an id in a list (`find(all::entries, id)`), and of a quantity where the id gives
+/// several ("" if it gives just one).
 constexpr match find(std::span<const entry> entries, std::string_view id,
                      std::string_view quantity = {}) {
   const entry* first = nullptr;

@@ -14,7 +14,7 @@ namespace catalogue {
 
 namespace detail {
 /// A JSON string (RFC 8259).
-inline std::string quoted(std::string_view s) {
+inline std::string json_string(std::string_view s) {
   std::string r = "\"";
   for (const char c : s) {
     if (c == '"' || c == '\\') r += '\\';
@@ -29,7 +29,7 @@ inline std::string quoted(std::string_view s) {
   return r + "\"";
 }
 inline std::string bound(double x) {
-  return x == unbounded || x == -unbounded ? "null" : convelope::detail::short_number(x);
+  return x >= unbounded || x <= -unbounded ? "null" : convelope::detail::short_number(x);
 }
 inline std::string scatter_text(double s) {
   return s < 0.0 ? "not stated" : "+-" + convelope::detail::short_number(100.0 * s) + " %";
@@ -38,18 +38,18 @@ inline std::string scatter_text(double s) {
 
 /// One correlation as a JSON object.
 inline std::string to_json(const correlation_info& c) {
-  using detail::quoted;
-  std::string s = "{\"id\":" + quoted(c.id) + ",\"quantity\":" + quoted(c.quantity) +
-                  ",\"gives\":" + quoted(c.gives) + ",\"inputs\":[";
+  using detail::json_string;
+  std::string s = "{\"id\":" + json_string(c.id) + ",\"quantity\":" + json_string(c.quantity) +
+                  ",\"gives\":" + json_string(c.gives) + ",\"inputs\":[";
   for (int i = 0; i < c.input_count; ++i) {
     const input_info& in = c.inputs[i];
-    s += std::string(i > 0 ? "," : "") + "{\"key\":" + quoted(in.key) +
-         ",\"words\":" + quoted(in.words) + ",\"on\":" + quoted(in.on) +
+    s += std::string(i > 0 ? "," : "") + "{\"key\":" + json_string(in.key) +
+         ",\"words\":" + json_string(in.words) + ",\"on\":" + json_string(in.on) +
          ",\"optional\":" + (in.optional ? "true" : "false");
     if (in.choices != nullptr) {
       s += ",\"choices\":[";
       for (int j = 0; in.choices[j] != nullptr; ++j) {
-        s += (j > 0 ? "," : "") + quoted(in.choices[j]);
+        s += (j > 0 ? "," : "") + json_string(in.choices[j]);
       }
       s += "]";
     }
@@ -57,17 +57,17 @@ inline std::string to_json(const correlation_info& c) {
   }
   s += "],\"envelope\":[";
   for (int i = 0; i < c.limit_count; ++i) {
-    s += std::string(i > 0 ? "," : "") + "{\"of\":" + quoted(c.limits[i].symbol) +
+    s += std::string(i > 0 ? "," : "") + "{\"of\":" + json_string(c.limits[i].symbol) +
          ",\"low\":" + detail::bound(c.limits[i].low) +
          ",\"high\":" + detail::bound(c.limits[i].high) + "}";
   }
   s += "],\"scatter\":" +
        (c.scatter < 0.0 ? std::string("null") : convelope::detail::short_number(c.scatter)) +
-       ",\"properties\":" + quoted(words(c.state_at)) + ",\"source\":" +
-       quoted(std::string(c.source->authors) + " " + std::to_string(c.source->year) + ", " +
-              c.source->where) +
-       ",\"constants\":" + quoted(words(c.source->constants)) +
-       ",\"note\":" + quoted(c.source->note) + "}";
+       ",\"properties\":" + json_string(words(c.state_at)) + ",\"source\":" +
+       json_string(std::string(c.source->authors) + " " + std::to_string(c.source->year) + ", " +
+                   c.source->where) +
+       ",\"constants\":" + json_string(words(c.source->constants)) +
+       ",\"note\":" + json_string(c.source->note) + "}";
   return s;
 }
 

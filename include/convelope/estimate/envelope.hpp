@@ -97,11 +97,11 @@ struct envelope_of {
   CONVELOPE_FUNCTION static constexpr bits_t<T> one(const L& l, int i, const V& v) {
     using adaptor = scalar_adaptor<V>;
     bits_t<T> bits(std::uint64_t{0});
-    if (l.low != -unbounded) {
+    if (l.low > -unbounded) {
       bits = bits | adaptor::bits_where(!(v >= adaptor::constant(l.low)),
                                         detail::word::of_correlation(0, i, side::below));
     }
-    if (l.high != unbounded) {
+    if (l.high < unbounded) {
       bits = bits | adaptor::bits_where(!(v <= adaptor::constant(l.high)),
                                         detail::word::of_correlation(0, i, side::above));
     }

@@ -23,8 +23,8 @@ inline std::string unit_text(const char* unit) {
 }
 
 inline std::string range_text(const limit_info& l) {
-  if (l.low == -unbounded) return "at most " + short_number(l.high);
-  if (l.high == unbounded) return "at least " + short_number(l.low);
+  if (l.low <= -unbounded) return "at most " + short_number(l.high);
+  if (l.high >= unbounded) return "at least " + short_number(l.low);
   return short_number(l.low) + " to " + short_number(l.high);
 }
 

@@ -142,7 +142,7 @@ class passage {
   }
   // A patch may have no perimeter (it takes no part), but not a negative or infinite one.
   CONVELOPE_FUNCTION static constexpr std::uint64_t perimeter_bits(double perimeter_m) {
-    return perimeter_m == 0.0 ? 0 : detail::usable_length(perimeter_m).bits;
+    return perimeter_m >= 0.0 && perimeter_m <= 0.0 ? 0 : detail::usable_length(perimeter_m).bits;
   }
 
   Section section_;

@@ -27,7 +27,7 @@ CONVELOPE_FUNCTION constexpr film<T> duct_film(const Fluid& f, const duct_flow<T
   const usable_length l(x1_m - x0_m);
   const usable_length end(x1_m);
   // Zero is the inlet itself, where the mean times x is 0.
-  const std::uint64_t start_bits = x0_m == 0.0 ? 0 : usable_length(x0_m).bits;
+  const std::uint64_t start_bits = x0_m >= 0.0 && x0_m <= 0.0 ? 0 : usable_length(x0_m).bits;
   const double start = start_bits == 0 ? x0_m : 0.0;
 
   const T& bulk = s.temperature.si();
