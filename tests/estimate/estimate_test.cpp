@@ -2,7 +2,7 @@
 
 #include <doctest/doctest.h>
 
-#include "convelope/groups/groups.hpp"
+#include "convelope/groups.hpp"
 #include "convelope/scalar/std_simd.hpp"
 #include "invented.hpp"
 

@@ -1,7 +1,7 @@
 #pragma once
 
 #include "convelope/estimate/correlation.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 // Correlations and a fluid made up to be easy to check by hand.
 

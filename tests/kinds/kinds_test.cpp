@@ -1,4 +1,4 @@
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 #include <doctest/doctest.h>
 

@@ -2,7 +2,7 @@
 
 #include <doctest/doctest.h>
 
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 #include "convelope/scalar/std_simd.hpp"
 
 using namespace convelope;

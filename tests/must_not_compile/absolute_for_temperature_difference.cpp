@@ -1,5 +1,5 @@
 // names: temperature_difference, absolute
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

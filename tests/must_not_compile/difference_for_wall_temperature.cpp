@@ -1,5 +1,5 @@
 // names: wall_temperature, temperature_base_dimension
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

@@ -1,5 +1,5 @@
 // names: kinematic_viscosity, mass_base_dimension
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

@@ -1,5 +1,5 @@
 // names: reynolds, diameter, int
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

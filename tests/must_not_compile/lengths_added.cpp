@@ -1,5 +1,5 @@
 // names: diameter, gap
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

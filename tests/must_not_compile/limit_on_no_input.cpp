@@ -1,6 +1,6 @@
 // names: grashof, reynolds, prandtl, this limit names a kind that is not an input
 #include "convelope/estimate/correlation.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

@@ -1,5 +1,5 @@
 // names: wall_temperature, double
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

@@ -1,6 +1,6 @@
 // names: envelope_of, at most six limits
 #include "convelope/estimate/envelope.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

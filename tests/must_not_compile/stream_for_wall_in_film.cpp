@@ -1,5 +1,5 @@
 // names: wall_temperature, free_stream_temperature
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

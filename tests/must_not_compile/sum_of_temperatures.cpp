@@ -1,5 +1,5 @@
 // names: wall_temperature, bulk_temperature
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 using namespace convelope;
 

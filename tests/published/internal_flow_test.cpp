@@ -8,7 +8,7 @@
 #include "convelope/correlations/friction/duct_friction.hpp"
 #include "convelope/correlations/internal/parallel_plates.hpp"
 #include "convelope/correlations/internal/round_duct.hpp"
-#include "convelope/groups/groups.hpp"
+#include "convelope/groups.hpp"
 
 using namespace convelope;
 using namespace convelope::units;

@@ -2,7 +2,7 @@
 
 #include <doctest/doctest.h>
 
-#include "convelope/scalar/scalar.hpp"
+#include "convelope/scalar.hpp"
 #include "host_number.hpp"
 #include "special_numbers.hpp"
 

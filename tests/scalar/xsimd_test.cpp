@@ -4,7 +4,7 @@
 
 #include <array>
 
-#include "convelope/scalar/scalar.hpp"
+#include "convelope/scalar.hpp"
 #include "special_numbers.hpp"
 
 using namespace convelope;

@@ -1,7 +1,7 @@
 #ifndef CONVELOPE_ESTIMATE_VERDICT_HPP
 #define CONVELOPE_ESTIMATE_VERDICT_HPP
 
-#include "convelope/scalar/scalar.hpp"
+#include "convelope/scalar.hpp"
 
 namespace convelope {
 inline namespace v0 {

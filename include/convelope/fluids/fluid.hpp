@@ -2,7 +2,7 @@
 #define CONVELOPE_FLUIDS_FLUID_HPP
 
 #include "convelope/estimate/estimate.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -2,7 +2,7 @@
 #define CONVELOPE_GROUPS_FORCED_HPP
 
 #include "convelope/estimate/estimate.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 // Groups of forced flow. Arguments are typed numbers or estimates; the result's kind follows from
 // theirs, and an estimate in gives an estimate out. Plain constants constrain them, not concepts:

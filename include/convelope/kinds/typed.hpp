@@ -1,7 +1,7 @@
 #ifndef CONVELOPE_KINDS_TYPED_HPP
 #define CONVELOPE_KINDS_TYPED_HPP
 
-#include "convelope/scalar/scalar.hpp"
+#include "convelope/scalar.hpp"
 #include "convelope/units/units.hpp"
 
 namespace convelope {

@@ -2,8 +2,8 @@
 #define CONVELOPE_SCALES_CONFINEMENT_HPP
 
 #include "convelope/estimate/info.hpp"
-#include "convelope/kinds/kinds.hpp"
-#include "convelope/scalar/scalar.hpp"
+#include "convelope/kinds.hpp"
+#include "convelope/scalar.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -1,7 +1,7 @@
 #ifndef CONVELOPE_SURFACES_EXPOSURE_HPP
 #define CONVELOPE_SURFACES_EXPOSURE_HPP
 
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 // What a wall is exposed to: the larger scale's answer at this wall.
 

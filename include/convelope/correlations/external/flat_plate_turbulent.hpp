@@ -2,7 +2,7 @@
 #define CONVELOPE_CORRELATIONS_EXTERNAL_FLAT_PLATE_TURBULENT_HPP
 
 #include "convelope/estimate/correlation.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -3,7 +3,7 @@
 
 #include "convelope/correlations/friction/solve.hpp"
 #include "convelope/estimate/correlation.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -3,7 +3,7 @@
 
 #include <limits>
 
-#include "convelope/scalar/scalar.hpp"
+#include "convelope/scalar.hpp"
 
 // Parts that the friction laws share.
 

@@ -2,7 +2,7 @@
 #define CONVELOPE_CORRELATIONS_INTERNAL_PARALLEL_PLATES_HPP
 
 #include "convelope/estimate/correlation.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -2,7 +2,7 @@
 #define CONVELOPE_CORRELATIONS_INTERNAL_ROUND_DUCT_LAMINAR_HPP
 
 #include "convelope/correlations/internal/round_duct_choices.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -2,7 +2,7 @@
 #define CONVELOPE_CORRELATIONS_NATURAL_HORIZONTAL_PLATE_UP_HPP
 
 #include "convelope/correlations/natural/thin_layer.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -4,7 +4,7 @@
 #include "convelope/correlations/natural/vertical_channel_isoflux.hpp"
 #include "convelope/correlations/natural/vertical_channel_optimum.hpp"
 #include "convelope/estimate/correlation.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

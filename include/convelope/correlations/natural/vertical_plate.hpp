@@ -3,7 +3,7 @@
 
 #include "convelope/correlations/natural/thin_layer.hpp"
 #include "convelope/correlations/natural/vertical_plate_local.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

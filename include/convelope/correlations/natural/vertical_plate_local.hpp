@@ -2,7 +2,7 @@
 #define CONVELOPE_CORRELATIONS_NATURAL_VERTICAL_PLATE_LOCAL_HPP
 
 #include "convelope/correlations/natural/thin_layer.hpp"
-#include "convelope/kinds/kinds.hpp"
+#include "convelope/kinds.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -1,7 +1,7 @@
 #ifndef CONVELOPE_FLUIDS_DETAIL_IAPWS_TRANSPORT_HPP
 #define CONVELOPE_FLUIDS_DETAIL_IAPWS_TRANSPORT_HPP
 
-#include "convelope/scalar/scalar.hpp"
+#include "convelope/scalar.hpp"
 
 namespace convelope {
 inline namespace v0 {

@@ -3,7 +3,7 @@
 
 #include <array>
 
-#include "convelope/scalar/scalar.hpp"
+#include "convelope/scalar.hpp"
 
 // IAPWS R7-97(2012), region 1: the Gibbs function of liquid water,
 // g/(R T) = gamma(pi, tau) = sum n (7.1 - pi)^i (tau - 1.222)^j, pi = p/16.53 MPa, tau = 1386 K/T.

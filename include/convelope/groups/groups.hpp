@@ -1,8 +1,0 @@
-#ifndef CONVELOPE_GROUPS_GROUPS_HPP
-#define CONVELOPE_GROUPS_GROUPS_HPP
-
-#include "convelope/groups/film.hpp"
-#include "convelope/groups/forced.hpp"
-#include "convelope/groups/natural.hpp"
-
-#endif
