@@ -54,6 +54,7 @@ layout::layout(const chassis_case& c) {
     if (p > 0) neighbours.push_back({p - 1, face::front});
     if (p < c.boards.size()) neighbours.push_back({p, face::back});
     std::vector<const board*> walls;
+    walls.reserve(neighbours.size());
     for (const auto& n : neighbours) walls.push_back(&c.boards[n.board]);
 
     const auto edges = segment_edges(walls, c.enclosure.length);

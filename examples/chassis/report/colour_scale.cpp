@@ -2,6 +2,7 @@
 
 #include <algorithm>
 #include <array>
+#include <cmath>
 #include <cstdio>
 
 namespace chassis {
@@ -26,7 +27,7 @@ std::string colour_scale::colour(double value) const {
   const double part = at - static_cast<double>(i);
   std::array<int, 3> mixed{};
   for (std::size_t k = 0; k < 3; ++k) {
-    mixed[k] = static_cast<int>(stops[i][k] + part * (stops[i + 1][k] - stops[i][k]) + 0.5);
+    mixed[k] = static_cast<int>(std::lround(stops[i][k] + part * (stops[i + 1][k] - stops[i][k])));
   }
   std::array<char, 16> text{};
   std::snprintf(text.data(), text.size(), "#%02x%02x%02x", mixed[0] & 255, mixed[1] & 255,

@@ -146,7 +146,9 @@ struct drawing {
     const double hottest_C = scale.hottest() - zero_celsius_K;
     const double coldest_C = scale.coldest() - zero_celsius_K;
     const int decimals = tick < 1 ? static_cast<int>(std::ceil(-std::log10(tick))) : 0;
-    for (double t = std::ceil(coldest_C / tick) * tick; t <= hottest_C; t += tick) {
+    const long last = std::lround(std::floor(hottest_C / tick));
+    for (long i = std::lround(std::ceil(coldest_C / tick)); i <= last; ++i) {
+      const double t = static_cast<double>(i) * tick;
       const double y = top + height * (hottest_C - t) / span;
       out << "<line x1=\"" << at(left + 20) << "\" y1=\"" << at(y) << "\" x2=\"" << at(left + 26)
           << "\" y2=\"" << at(y) << "\" stroke=\"#444\"/>\n"

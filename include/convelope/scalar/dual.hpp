@@ -43,7 +43,7 @@ class dual {
   static constexpr int size = Size;
 
   T value;
-  T slope[static_cast<std::size_t>(Size == 0 ? 1 : Size)];
+  T slope[static_cast<std::size_t>(Size + (Size == 0))];  // no array is empty
 
   dual() = default;
   CONVELOPE_FUNCTION constexpr dual(const T& v) : value(v), slope{} {  // NOLINT: literals convert
