@@ -8,7 +8,7 @@ int main() {
                             stream{free_stream_velocity(4.0 * units::metre_per_second),
                                    free_stream_temperature(celsius(20.0))});
   const auto answer = tube.at(wall_temperature(celsius(60.0)));
-  std::printf("convelope %d.%d.%d: %.1f W/m2\n", CONVELOPE_VERSION_MAJOR, CONVELOPE_VERSION_MINOR,
-              CONVELOPE_VERSION_PATCH, answer.flux().si());
+  std::printf("convelope %d.%d.%d\n", CONVELOPE_VERSION_MAJOR, CONVELOPE_VERSION_MINOR,
+              CONVELOPE_VERSION_PATCH);
   return answer.inside() && answer.flux().si() > 0.0 ? 0 : 1;
 }
