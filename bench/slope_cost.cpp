@@ -20,13 +20,22 @@ T load(const double* x) {
   }
 }
 
+// As behind a wall temperature: both numbers vary with it.
+template <class T>
+dual<T> both(const T& x, double slope) {
+  dual<T> d(x);
+  d.slope[0] = T(slope);
+  return d;
+}
+
 template <class T>
 void value(benchmark::State& state) {
   const auto Re = bench::spread(10.0, 1e6, 1024);
+  const auto Pr = bench::spread(0.7, 12.0, 1024);
   for (auto _ : state) {
     T sum(0.0);
     for (std::size_t i = 0; i < Re.size(); i += std::size_t(scalar_adaptor<T>::lanes)) {
-      sum += correlation_type::formula(load<T>(&Re[i]), T(0.71));
+      sum += correlation_type::formula(load<T>(&Re[i]), load<T>(&Pr[i]));
     }
     benchmark::DoNotOptimize(sum);
   }
@@ -35,12 +44,13 @@ void value(benchmark::State& state) {
 template <class T>
 void with_slope(benchmark::State& state) {
   const auto Re = bench::spread(10.0, 1e6, 1024);
+  const auto Pr = bench::spread(0.7, 12.0, 1024);
   for (auto _ : state) {
     T sum(0.0);
     T slopes(0.0);
     for (std::size_t i = 0; i < Re.size(); i += std::size_t(scalar_adaptor<T>::lanes)) {
       const auto y =
-          correlation_type::formula(dual<T>::variable(load<T>(&Re[i])), dual<T>(T(0.71)));
+          correlation_type::formula(both(load<T>(&Re[i]), 3.0), both(load<T>(&Pr[i]), 0.1));
       sum += y.value;
       slopes += y.slope[0];
     }

@@ -5,7 +5,7 @@
 #include <cmath>
 
 #include "convelope/boundary/surface.hpp"
-#include "convelope/faces/std_simd.hpp"
+#include "convelope/faces/widest.hpp"
 #include "convelope/fluids/dry_air.hpp"
 #include "convelope/surfaces/cylinder.hpp"
 #include "ratios.hpp"
@@ -22,6 +22,7 @@ double polynomial(double T, double a, double b, double c, double d) {
   return a + b * T + c * std::pow(T, 2) + d * std::pow(T, 3);
 }
 
+// The law of cylinder_in_crossflow: forced and natural convection joined by fourth powers.
 double textbook_flux(double wall) {
   const double T = 0.5 * (wall + stream_K);
   const double rho = 101325.0 / (287.1 * T);
@@ -33,7 +34,15 @@ double textbook_flux(double wall) {
   const double forced = 0.3 + 0.62 * std::pow(Re, 0.5) * std::pow(Pr, 1.0 / 3.0) /
                                   std::pow(1.0 + std::pow(0.4 / Pr, 2.0 / 3.0), 0.25) *
                                   std::pow(1.0 + std::pow(Re / 282000.0, 5.0 / 8.0), 4.0 / 5.0);
-  return forced * k / diameter_m * (wall - stream_K);
+  const double Ra = 9.80665 / stream_K * std::abs(wall - stream_K) * std::pow(diameter_m, 3) *
+                    std::pow(rho, 2) * cp / (mu * k);
+  const double natural =
+      std::pow(0.60 + 0.387 * std::pow(Ra, 1.0 / 6.0) /
+                          std::pow(1.0 + std::pow(0.559 / Pr, 9.0 / 16.0), 8.0 / 27.0),
+               2);
+  const double Nu =
+      std::pow(std::pow(forced, 4) + std::pow(natural, 4) - std::pow(0.3, 4), 0.25);
+  return Nu * k / diameter_m * (wall - stream_K);
 }
 
 const std::vector<double>& walls() {

@@ -11,9 +11,10 @@ using correlation_type = cylinder_crossflow::churchill_bernstein_1977;
 
 void off(benchmark::State& state) {
   const auto Re = bench::spread(10.0, 1e6, 1024);
+  const auto Pr = bench::spread(0.7, 12.0, 1024);
   for (auto _ : state) {
     double sum = 0.0;
-    for (const double x : Re) sum += correlation_type::formula(x, 0.71);
+    for (std::size_t i = 0; i < Re.size(); ++i) sum += correlation_type::formula(Re[i], Pr[i]);
     benchmark::DoNotOptimize(sum);
   }
 }
@@ -21,11 +22,12 @@ BENCHMARK(off);
 
 void on(benchmark::State& state) {
   const auto Re = bench::spread(10.0, 1e6, 1024);
+  const auto Pr = bench::spread(0.7, 12.0, 1024);
   for (auto _ : state) {
     double sum = 0.0;
     std::uint64_t crossed = 0;
-    for (const double x : Re) {
-      const auto Nu = correlation_type{}(reynolds_of<diameter>(x), prandtl_number(0.71));
+    for (std::size_t i = 0; i < Re.size(); ++i) {
+      const auto Nu = correlation_type{}(reynolds_of<diameter>(Re[i]), prandtl_number(Pr[i]));
       sum += Nu.si();
       crossed |= Nu.verdict().bits();
     }

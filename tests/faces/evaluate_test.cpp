@@ -51,7 +51,7 @@ TEST_CASE("faces: none at all") {
 TEST_CASE("faces: arrays of different lengths are refused, whichever it is") {
   arrays a(20, 4);
   arrays marked(20, 4);
-  const auto shorter = [](auto span) { return span.first(19); };
+  const auto shorter = [](auto column) { return column.part(0, 19); };
   for (int which = 0; which < 8; ++which) {
     CAPTURE(which);
     faces::inputs in = a.in();

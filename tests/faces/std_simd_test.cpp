@@ -1,6 +1,5 @@
 // Packs of faces against faces one by one.
-#include "convelope/faces/std_simd.hpp"
-
+#include "convelope/faces/widest.hpp"
 #include "convelope/surfaces/cylinder.hpp"
 #include "convelope/surfaces/duct.hpp"
 #include "convelope/surfaces/vertical_plate.hpp"
@@ -16,7 +15,7 @@ auto wall_of(const G& g, const Fluid& f) {
 }
 const auto tube = wall_of(cylinder_in_crossflow{number<kinds::diameter>(0.03)}, dry_air_fast{});
 
-using four = std::experimental::fixed_size_simd<double, 4>;
+using four [[maybe_unused]] = std::experimental::fixed_size_simd<double, 4>;
 
 }  // namespace
 
@@ -37,11 +36,13 @@ TEST_CASE("packs of faces: every remainder, aligned or not") {
   }
 }
 
+#if !(defined(__clang__) && defined(__AVX512F__))  // see std_simd.hpp
 TEST_CASE("packs of faces: a wider pack than the machine's") {
   arrays a(103, 50);
   CHECK(faces::evaluate<four>(tube, a.in(), a.out()) == faces::status::done);
   expect_as_alone(tube, a);
 }
+#endif
 
 TEST_CASE("packs of faces: other walls and fluids") {
   arrays a(201, 51);

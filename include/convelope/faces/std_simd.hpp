@@ -4,29 +4,42 @@
 #include "convelope/faces/evaluate.hpp"
 #include "convelope/scalar/std_simd.hpp"
 
-// faces::evaluate<faces::widest>(...): as many faces at a time as the machine flags of this
-// translation unit allow.
+// Lets faces::evaluate go by packs of std::experimental::simd.
 
 namespace convelope {
 inline namespace v0 {
 namespace faces {
-
-using widest = std::experimental::native_simd<double>;
-
 namespace detail {
+
 template <class Abi>
-struct face_access<std::experimental::simd<double, Abi>> {
-  using pack = std::experimental::simd<double, Abi>;
-  static pack load(const double* from) { return pack(from, std::experimental::element_aligned); }
-  static void store(const pack& x, double* to) {
-    x.copy_to(to, std::experimental::element_aligned);
+struct array_number<std::experimental::simd<float, Abi>> {
+  using type = float;
+};
+
+template <class Number, class Abi>
+struct face_access<std::experimental::simd<Number, Abi>> {
+  using pack = std::experimental::simd<Number, Abi>;
+  static pack load(const column<const Number>& c, std::size_t i) {
+    if (c.step() == 1) return pack(c.at(i), std::experimental::element_aligned);
+    return pack([&](auto lane) { return *c.at(i + lane); });
   }
-  static void store_bits(const bits_t<pack>& b, std::uint64_t* to) {
-    b.copy_to(to, std::experimental::element_aligned);
+  static void store(const pack& x, const column<Number>& c, std::size_t i) { put(x, c, i); }
+  static void store_bits(const bits_t<pack>& b, const column<std::uint64_t>& c, std::size_t i) {
+    put(b, c, i);
+  }
+
+ private:
+  template <class Pack, class Element>
+  static void put(const Pack& x, const column<Element>& c, std::size_t i) {
+    if (c.step() == 1) {
+      x.copy_to(c.at(i), std::experimental::element_aligned);
+    } else {
+      for (std::size_t lane = 0; lane < Pack::size(); ++lane) *c.at(i + lane) = x[lane];
+    }
   }
 };
-}  // namespace detail
 
+}  // namespace detail
 }  // namespace faces
 }  // namespace v0
 }  // namespace convelope

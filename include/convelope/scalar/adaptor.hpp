@@ -13,11 +13,9 @@
 namespace convelope {
 inline namespace v0 {
 
-/// What the library asks of a number type. The default finds the elementary functions by ADL;
-/// a pack or an automatic-differentiation type that needs more specialises this template
-/// (see scalar/dual.hpp, scalar/std_simd.hpp, scalar/xsimd.hpp).
+/// For a type that behaves like a number: finds the elementary functions by ADL.
 template <class T>
-struct scalar_adaptor {
+struct basic_adaptor {
   using plain = T;             // the number without its derivatives
   using working = T;           // the type formulas run on
   using bits = std::uint64_t;  // one verdict word per lane
@@ -54,13 +52,21 @@ struct scalar_adaptor {
     return m ? word : std::uint64_t{0};
   }
   /// `word` where x is NaN or infinite as a double (a wider number beyond 1.8e308 counts). Looks at
-  /// the exponent bits, so -ffast-math can't fold it.
+  /// the exponent bits, so -ffast-math can't fold it: when all are set, one more carries into the
+  /// sign bit.
   CONVELOPE_FUNCTION static constexpr bits bits_where_not_finite(const T& x, std::uint64_t word) {
     constexpr std::uint64_t exponent = 0x7ff0000000000000ULL;
+    constexpr std::uint64_t one = 0x0010000000000000ULL;
     const auto raw = std::bit_cast<std::uint64_t>(static_cast<double>(x));
-    return (raw & exponent) == exponent ? word : std::uint64_t{0};
+    const auto carried = static_cast<std::int64_t>((raw & exponent) + one);
+    return static_cast<std::uint64_t>(carried >> 63) & word;
   }
 };
+
+/// What the library asks of a number type. A pack or an automatic-differentiation type that needs
+/// more specialises this template (see scalar/dual.hpp, scalar/std_simd.hpp, scalar/xsimd.hpp).
+template <class T>
+struct scalar_adaptor : basic_adaptor<T> {};
 
 template <class T>
 using plain_t = typename scalar_adaptor<T>::plain;

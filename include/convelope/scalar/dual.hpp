@@ -1,7 +1,7 @@
 #ifndef CONVELOPE_SCALAR_DUAL_HPP
 #define CONVELOPE_SCALAR_DUAL_HPP
 
-#include "convelope/scalar/power.hpp"
+#include "convelope/scalar/elementary.hpp"
 
 namespace convelope {
 inline namespace v0 {
@@ -193,11 +193,16 @@ struct scalar_adaptor<dual<T, Size>> {
   template <int P, int Q>
     requires(Size > 0)
   CONVELOPE_FUNCTION static D power(const D& x) {
-    const T v = math::power<P, Q>(x.value);
     if constexpr (Q == 1 && P >= 1) {  // no division: right at x = 0 too
-      return scaled(x, v,
+      return scaled(x, math::power<P>(x.value),
                     [&] { return T(math::power<P - 1>(x.value) * detail::as<T>(double(P))); });
+    } else if constexpr (requires {
+                           scalar_adaptor<T>::template power_and_quotient<P, Q>(x.value);
+                         }) {
+      const auto both = scalar_adaptor<T>::template power_and_quotient<P, Q>(x.value);
+      return scaled(x, both.power, [&] { return T(both.per_x * math::detail::ratio<T>(P, Q)); });
     } else {
+      const T v = math::power<P, Q>(x.value);
       return scaled(x, v, [&] { return T(v / x.value * math::detail::ratio<T>(P, Q)); });
     }
   }

@@ -17,8 +17,10 @@ constexpr int power_of(int base, int n) { return n == 0 ? 1 : base * power_of(ba
 /// x^n by squaring.
 template <int Exponent, class T>
 CONVELOPE_FUNCTION constexpr T whole_power(const T& x) {
-  static_assert(Exponent >= 1);
-  if constexpr (Exponent == 1) {
+  static_assert(Exponent >= 0);
+  if constexpr (Exponent == 0) {
+    return scalar_adaptor<T>::constant(1.0);
+  } else if constexpr (Exponent == 1) {
     return x;
   } else if constexpr (Exponent % 2 == 0) {
     const T half = whole_power<Exponent / 2>(x);
@@ -64,10 +66,9 @@ CONVELOPE_FUNCTION constexpr T positive_power(const T& x) {
 }
 }  // namespace detail
 
-/// x^(P/Q) for x >= 0, chosen at compile time: square and cube roots and products where the
-/// denominator allows (2, 3, 4, 6, 8, 12, 16 ...), otherwise one exp/log pair.
-/// Error in units in the last place, P/Q in lowest terms: below 2 P by roots, below
-/// 1.5 (1 + |log x| P/Q) by the exp/log pair.
+/// x^(P/Q) for x >= 0, chosen at compile time: roots and products where the denominator allows (2,
+/// 3, 4, 5, 6, 8, 10, 12, 16), otherwise one exp/log pair. Error in units in the last place, P/Q in
+/// lowest terms: below 2 |P| + 8 by roots, below 2 (1 + |log2 x P/Q|) by the exp/log pair.
 template <int P, int Q = 1, class T>
 CONVELOPE_FUNCTION constexpr T power(const T& x) {
   static_assert(Q > 0, "write the sign of the exponent in its numerator");

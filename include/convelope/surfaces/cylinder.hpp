@@ -43,8 +43,9 @@ struct cylinder_in_crossflow {
     const T N4 = math::power<4>(natural::formula(Ra, Pr));
     const T sum = T(F4 + N4);
 
-    const P forced_share = P(plain(F4) / plain(sum));
-    const P natural_share = P(plain(N4) / plain(sum));
+    const P per_sum = P(scalar_adaptor<P>::constant(1.0) / plain(sum));
+    const P forced_share = P(plain(F4) * per_sum);
+    const P natural_share = P(plain(N4) * per_sum);
     const bits_t<T> bits(bits_t<T>(d.bits) | f.check(at, p) |
                          detail::sound<T>(wall, ambient, p, s.velocity.si(), gravity.si()) |
                          detail::asked<forced, T>(0, forced_share, Re, Pr) |

@@ -7,6 +7,15 @@
 namespace convelope {
 inline namespace v0 {
 
+namespace detail {
+/// The laminar part, 0.62 Re^(1/2) Pr^(1/3) / [1 + (0.4/Pr)^(2/3)]^(1/4).
+template <class T>
+CONVELOPE_FUNCTION constexpr T crossflow_low(const T& Re, const T& Pr) {
+  return T(0.62 * math::power<1, 2>(Re) * math::power<1, 3>(Pr) *
+           math::power<-1, 4>(T(1.0 + 0.5428835233189813143 * math::power<-2, 3>(Pr))));
+}
+}  // namespace detail
+
 /// A long circular cylinder, its axis across an unbounded stream.
 namespace cylinder_crossflow {
 
@@ -31,9 +40,8 @@ struct churchill_bernstein_1977 : correlation<churchill_bernstein_1977, nusselt_
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Re, const T& Pr) {
-    const T low =
-        T(0.62 * sqrt(Re) * power<1, 3>(Pr) / power<1, 4>(T(1.0 + power<2, 3>(T(0.4 / Pr)))));
-    return T(0.3 + low * power<4, 5>(T(1.0 + power<5, 8>(T(Re * (1.0 / 282000.0))))));
+    return T(0.3 + detail::crossflow_low(Re, Pr) *
+                       power<4, 5>(T(1.0 + 3.922783205509214561e-04 * power<5, 8>(Re))));
   }
 };
 
@@ -58,9 +66,7 @@ struct churchill_bernstein_1977_midrange
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Re, const T& Pr) {
-    const T low =
-        T(0.62 * sqrt(Re) * power<1, 3>(Pr) / power<1, 4>(T(1.0 + power<2, 3>(T(0.4 / Pr)))));
-    return T(0.3 + low * (1.0 + sqrt(T(Re * (1.0 / 282000.0)))));
+    return T(0.3 + detail::crossflow_low(Re, Pr) * (1.0 + 1.88310894288677357e-03 * power<1, 2>(Re)));
   }
 };
 

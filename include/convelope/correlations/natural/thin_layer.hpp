@@ -12,7 +12,7 @@ namespace detail::thin_layer {
 /// 1 + (c/Pr)^(9/16): Churchill and Usagi's passage from low to high Prandtl numbers.
 template <class T>
 CONVELOPE_FUNCTION constexpr T prandtl_bracket(double c, const T& Pr) {
-  return T(1.0 + math::power<9, 16>(T(c / Pr)));
+  return T(1.0 + math::power<9, 16>(c) * math::power<-9, 16>(Pr));
 }
 
 /// C_l of Raithby and Hollands: 0.671 / [1 + (0.492/Pr)^(9/16)]^(4/9).
