@@ -1,67 +1,75 @@
-// What does an exact derivative cost? Value with slope (dual) against the value alone, one number
-// at a time and a pack at a time.
+// What does an exact derivative cost? q with dq/dT_wall (dual numbers) against q alone, air across
+// a cylinder, one wall at a time and a pack at a time.
 
-#include "convelope/correlations/external/cylinder_crossflow.hpp"
-#include "convelope/scalar/std_simd.hpp"
+#include "convelope/faces/widest.hpp"
+#include "convelope/fluids/dry_air.hpp"
+#include "convelope/surfaces/cylinder.hpp"
 #include "ratios.hpp"
 
 namespace {
 
 using namespace convelope;
-using correlation_type = cylinder_crossflow::churchill_bernstein_1977;
-using pack = std::experimental::native_simd<double>;
 
-template <class T>
-T load(const double* x) {
-  if constexpr (std::is_same_v<T, pack>) {
-    return pack(x, std::experimental::element_aligned);
-  } else {
-    return *x;
+const auto tube = cylinder_in_crossflow{diameter(0.05 * units::metre)};
+const auto wind = stream{free_stream_velocity(4.0 * units::metre_per_second),
+                         free_stream_temperature(kelvin(300.0))};
+
+template <class T, class Ask>
+[[gnu::flatten]] void each(benchmark::State& state, Ask ask) {
+  using access = faces::detail::face_access<T>;
+  const auto wall = bench::spread(310.0, 420.0, 4096);
+  std::vector<double> q(wall.size());
+  std::vector<double> slope(wall.size());
+  std::vector<std::uint64_t> crossed(wall.size());
+  const faces::column<const double> in(wall);
+  const faces::column<double> out(q);
+  const faces::column<double> out_slope(slope);
+  const faces::column<std::uint64_t> out_verdict(crossed);
+  for (auto _ : state) {
+    for (std::size_t i = 0; i < wall.size(); i += std::size_t(scalar_adaptor<T>::lanes)) {
+      const auto answer = ask(access::load(in, i));
+      access::store(answer.q, out, i);
+      if constexpr (requires { answer.slope; }) access::store(answer.slope, out_slope, i);
+      access::store_bits(answer.bits, out_verdict, i);
+    }
+    benchmark::ClobberMemory();
   }
 }
 
-// As behind a wall temperature: both numbers vary with it.
 template <class T>
-dual<T> both(const T& x, double slope) {
-  dual<T> d(x);
-  d.slope[0] = T(slope);
-  return d;
-}
+struct without {
+  T q;
+  bits_t<T> bits;
+};
+template <class T>
+struct with {
+  T q;
+  T slope;
+  bits_t<T> bits;
+};
 
 template <class T>
 void value(benchmark::State& state) {
-  const auto Re = bench::spread(10.0, 1e6, 1024);
-  const auto Pr = bench::spread(0.7, 12.0, 1024);
-  for (auto _ : state) {
-    T sum(0.0);
-    for (std::size_t i = 0; i < Re.size(); i += std::size_t(scalar_adaptor<T>::lanes)) {
-      sum += correlation_type::formula(load<T>(&Re[i]), load<T>(&Pr[i]));
-    }
-    benchmark::DoNotOptimize(sum);
-  }
+  each<T>(state, [](const T& wall) {
+    const film<T> f = tube.film_at(dry_air_fast{}, wind.as<T>(), wall);
+    return without<T>{T(f.coefficient * (wall - f.reference_temperature)), f.bits};
+  });
 }
 
 template <class T>
 void with_slope(benchmark::State& state) {
-  const auto Re = bench::spread(10.0, 1e6, 1024);
-  const auto Pr = bench::spread(0.7, 12.0, 1024);
-  for (auto _ : state) {
-    T sum(0.0);
-    T slopes(0.0);
-    for (std::size_t i = 0; i < Re.size(); i += std::size_t(scalar_adaptor<T>::lanes)) {
-      const auto y =
-          correlation_type::formula(both(load<T>(&Re[i]), 3.0), both(load<T>(&Pr[i]), 0.1));
-      sum += y.value;
-      slopes += y.slope[0];
-    }
-    benchmark::DoNotOptimize(sum);
-    benchmark::DoNotOptimize(slopes);
-  }
+  each<T>(state, [](const T& wall) {
+    using D = dual<T>;
+    const D w = D::variable(wall);
+    const film<D> f = tube.film_at(dry_air_fast{}, wind.as<D>(), w);
+    const D q = f.coefficient * (w - f.reference_temperature);
+    return with<T>{q.value, q.slope[0], f.bits};
+  });
 }
 BENCHMARK(value<double>)->Name("value_scalar");
 BENCHMARK(with_slope<double>)->Name("slope_scalar");
-BENCHMARK(value<pack>)->Name("value_simd");
-BENCHMARK(with_slope<pack>)->Name("slope_simd");
+BENCHMARK(value<faces::widest>)->Name("value_simd");
+BENCHMARK(with_slope<faces::widest>)->Name("slope_simd");
 
 }  // namespace
 

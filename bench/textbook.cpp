@@ -1,6 +1,7 @@
 // What would a user write instead? q and dq/dT_wall of air across a cylinder, per face: the
 // textbook spelling (std::pow in every factor, a polynomial for each property, a second call for
-// the finite-difference slope) against this library, face by face and with packs.
+// the finite-difference slope) against this library, face by face and with packs; and packs by
+// hand.
 
 #include <cmath>
 
@@ -8,6 +9,7 @@
 #include "convelope/faces/widest.hpp"
 #include "convelope/fluids/dry_air.hpp"
 #include "convelope/surfaces/cylinder.hpp"
+#include "hand.hpp"
 #include "ratios.hpp"
 
 namespace {
@@ -40,8 +42,7 @@ double textbook_flux(double wall) {
       std::pow(0.60 + 0.387 * std::pow(Ra, 1.0 / 6.0) /
                           std::pow(1.0 + std::pow(0.559 / Pr, 9.0 / 16.0), 8.0 / 27.0),
                2);
-  const double Nu =
-      std::pow(std::pow(forced, 4) + std::pow(natural, 4) - std::pow(0.3, 4), 0.25);
+  const double Nu = std::pow(std::pow(forced, 4) + std::pow(natural, 4) - std::pow(0.3, 4), 0.25);
   return Nu * k / diameter_m * (wall - stream_K);
 }
 
@@ -84,6 +85,25 @@ void ours(benchmark::State& state) {
     benchmark::ClobberMemory();
   }
 }
+void by_hand(benchmark::State& state) {
+  using V = faces::widest;
+  using access = faces::detail::face_access<V>;
+  const hand::tube tube{diameter_m, velocity_m_s, stream_K, 101325.0};
+  std::vector<double> q(walls().size());
+  std::vector<double> slope(walls().size());
+  const faces::column<const double> in(walls());
+  const faces::column<double> out(q);
+  const faces::column<double> out_slope(slope);
+  for (auto _ : state) {
+    for (std::size_t i = 0; i < walls().size(); i += std::size_t(scalar_adaptor<V>::lanes)) {
+      const auto y = hand::flux(tube, access::load(in, i));
+      access::store(y.value, out, i);
+      access::store(y.slope, out_slope, i);
+    }
+    benchmark::ClobberMemory();
+  }
+}
+BENCHMARK(by_hand);
 BENCHMARK(ours<double>)->Name("faces_scalar");
 BENCHMARK(ours<faces::widest>)->Name("faces_simd");
 
@@ -93,5 +113,6 @@ int main(int argc, char** argv) {
   return bench::run(argc, argv,
                     {{"textbook_over_scalar", "textbook", "faces_scalar"},
                      {"textbook_over_faces", "textbook", "faces_simd"},
+                     {"faces_over_hand", "faces_simd", "by_hand"},
                      {"faces_scalar_over_simd", "faces_scalar", "faces_simd"}});
 }

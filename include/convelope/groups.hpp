@@ -4,5 +4,7 @@
 #include "convelope/groups/film.hpp"
 #include "convelope/groups/forced.hpp"
 #include "convelope/groups/natural.hpp"
+#include "convelope/groups/property_ratio.hpp"
+#include "convelope/groups/state.hpp"
 
 #endif

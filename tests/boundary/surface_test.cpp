@@ -65,11 +65,12 @@ TEST_CASE("surface: the equivalent pair is the tangent, or the secant where q fa
   // A film whose q falls with T_wall.
   const film<dual<double>> falling{
       dual<double>::variable(10.0) * -1.0 + 110.0, dual<double>(90.0), 0, 0.0, {1.0, 0.0, 0.0}};
-  const wall_answer<double> answer(100.0, falling, cylinder_in_crossflow::speaks, dry_air{}.info());
+  const wall_answer<double> answer(100.0, falling, &cylinder_in_crossflow::speaks,
+                                   dry_air{}.info());
   CHECK(answer.slope().si() == doctest::Approx(100.0 - 10.0));  // h + dh/dT (T - T_ref)
   const film<dual<double>> steep{
       dual<double>::variable(10.0) * -20.0 + 300.0, dual<double>(90.0), 0, 0.0, {1.0, 0.0, 0.0}};
-  const wall_answer<double> down(100.0, steep, cylinder_in_crossflow::speaks, dry_air{}.info());
+  const wall_answer<double> down(100.0, steep, &cylinder_in_crossflow::speaks, dry_air{}.info());
   CHECK(down.slope().si() == doctest::Approx(100.0 - 200.0));
   CHECK(down.equivalent().coefficient == 100.0);
   CHECK(down.equivalent().temperature == 90.0);

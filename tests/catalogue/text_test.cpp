@@ -9,6 +9,7 @@
 #include <string>
 
 #include "convelope/catalogue/catalogue.hpp"
+#include "convelope/catalogue/fluids.hpp"
 
 using namespace convelope;
 using catalogue::all;
@@ -88,5 +89,58 @@ TEST_CASE("markdown: a section per entry") {
     CHECK(section.find(words(c.source->constants)) != std::string::npos);
     CHECK((section.find("Scatter: not stated") != std::string::npos) == (c.scatter < 0.0));
     CHECK((section.find("- Note: ") != std::string::npos) == (*c.source->note != 0));
+  }
+}
+
+TEST_CASE("fluids as JSON: what the entry says, and no word on where properties are taken") {
+  using catalogue::all_fluids;
+  const json list = json::parse(catalogue::to_json(all_fluids), nullptr, false);
+  REQUIRE(list.is_array());
+  REQUIRE(list.size() == all_fluids.size());
+  for (std::size_t i = 0; i < list.size(); ++i) {
+    const correlation_info& c = *all_fluids[i].info;
+    const json& j = list[i];
+    CAPTURE(std::string(c.id));
+    CHECK(j["id"] == c.id);
+    CHECK(j["quantity"] == c.quantity);
+    CHECK(j["gives"] == c.gives);
+    CHECK(j["properties"].is_null());
+    CHECK(j["inputs"].size() == static_cast<std::size_t>(c.input_count));
+    CHECK(j["envelope"].size() == static_cast<std::size_t>(c.limit_count));
+    CHECK(j["source"].get<std::string>().find(" 0,") == std::string::npos);
+  }
+}
+
+TEST_CASE("fluids as Markdown: each property once, in a section of its formulation") {
+  using catalogue::all_fluids;
+  const std::string page = catalogue::to_markdown(all_fluids);
+  std::size_t rows = 0;
+  for (std::size_t at = page.find("| `"); at != std::string::npos; at = page.find("| `", at + 1)) {
+    ++rows;
+  }
+  CHECK(rows == all_fluids.size());
+  for (const catalogue::entry& e : all_fluids) {
+    const correlation_info& c = *e.info;
+    const std::string row = std::string("| `") + c.quantity + "` | " + c.gives + " | ";
+    CAPTURE(std::string(c.id));
+    CAPTURE(row);
+    // Of the sections of this id, one holds the row with the inputs, limits and source.
+    int found = 0;
+    const std::string heading = std::string("### ") + c.id + " (";
+    for (std::size_t at = page.find(heading); at != std::string::npos;
+         at = page.find(heading, at + 1)) {
+      const std::string section = page.substr(at, page.find("\n### ", at) - at);
+      if (section.find(row) == std::string::npos) continue;
+      ++found;
+      CHECK(section.find(c.source->where) != std::string::npos);
+      for (int k = 0; k < c.input_count; ++k) {
+        CHECK(section.find("`" + std::string(c.inputs[k].key) + "` ") != std::string::npos);
+      }
+      for (int k = 0; k < c.limit_count; ++k) {
+        CHECK(section.find(std::string(c.limits[k].symbol) + " " +
+                           detail::range_text(c.limits[k])) != std::string::npos);
+      }
+    }
+    CHECK(found == 1);
   }
 }

@@ -100,6 +100,27 @@ TEST_CASE("batch: each error names the input, its value and what was expected") 
         std::string::npos);
 }
 
+TEST_CASE("batch: fluids") {
+  const auto all = batch(
+      "fluid/water quantity=mu;T=300;p=3e6\n"
+      "fluid/water quantity=mu;T=300\n"
+      "fluid/water quantity=mu;T=700;p=1e5\n"
+      "fluid/water-if97-r4 quantity=psat;T=300\n"
+      "fluid/humid-air quantity=mu;T=300;phi=-0.1\n");
+  REQUIRE(all.size() == 5);
+  CHECK(all[0]["inside"] == true);
+  CHECK(all[0]["quantity"] == "mu");
+  CHECK(all[1]["value"] != all[0]["value"]);
+  CHECK(all[2]["inside"] == false);
+  CHECK(all[2]["crossed"] == json::array({"T above 623.15", "p/p_sat below 0.99975"}));
+  // IAPWS R7-97(2012), Table 35
+  CHECK(all[3]["value"].get<double>() == doctest::Approx(3536.58941).epsilon(3e-9));
+  CHECK(all[3]["scatter"] == 0.00025);
+  CHECK(all[4]["crossed"][0] == "phi below 0");
+  CHECK(error_of("fluid/air quantity=mu;T=nan") == "T: 'nan' is not a finite number");
+  CHECK(error_of("fluid/air quantity=mu;p=1e5") == "T: missing; expected temperature, K");
+}
+
 TEST_CASE("batch: the example of every row") {
   std::string input;
   for (const expected::row& row : expected::rows) {

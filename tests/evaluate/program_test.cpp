@@ -7,14 +7,17 @@
 #include <string>
 
 #include "convelope/catalogue/catalogue.hpp"
+#include "convelope/catalogue/fluids.hpp"
 #include "run_program.hpp"
 
 using convelope::catalogue::all;
+using convelope::catalogue::all_fluids;
 using evaluate_test::run;
 
 namespace {
 
 const std::string tube = "cylinder-crossflow/churchill-bernstein-1977";
+constexpr std::size_t everything = static_cast<std::size_t>(all::count) + all_fluids.size();
 
 bool has(const std::string& text, const std::string& part) {
   return text.find(part) != std::string::npos;
@@ -66,6 +69,42 @@ TEST_CASE("evaluate: quantity where an id gives several, choices, defaults") {
             "entry: 'thermic' is not a choice; expected thermal or combined");
 }
 
+TEST_CASE("evaluate: a property of a fluid, with its unit and without talk of correlations") {
+  const auto o = run("fluid/water-if97-r1 quantity=cp T=300 p=3e6");
+  CHECK(o.code == 0);
+  CHECK(o.error == "");
+  // IAPWS R7-97(2012), Table 5
+  REQUIRE(o.out.rfind("cp = ", 0) == 0);
+  CHECK(std::stod(o.out.substr(5)) == doctest::Approx(4173.01218).epsilon(1e-9));
+  CHECK(has(o.lines()[0], " J/(kg K)  (specific heat at constant pressure)"));
+  CHECK(has(o.out, "Inside every stated range."));
+  CHECK(has(o.out, "Uncertainty: +-0.3 %"));
+  CHECK(has(o.out, "R7-97(2012)"));
+  CHECK_FALSE(has(o.out, "Scatter"));
+  CHECK_FALSE(has(o.out, "Properties"));
+
+  CHECK(has(run("fluid/water quantity=Pr T=300").lines()[0], "  (Prandtl number)"));
+  const auto fitted = run("fluid/nak78 quantity=rho_linear T=400");
+  CHECK(has(fitted.out, "Source: fitted here, to"));
+
+  const auto hot = run("fluid/water quantity=rho T=400 p=1e5");
+  CHECK(hot.code == 0);
+  CHECK(has(hot.out, "p/p_sat is below its range"));
+  CHECK_FALSE(has(hot.out, "Inside"));
+  // The pressure may be left out, a mixture's parameter may not.
+  CHECK(run("fluid/air quantity=mu T=300").out == run("fluid/air quantity=mu T=300 p=101325").out);
+  complains("fluid/seawater quantity=mu T=300",
+            "S: missing; expected salinity, g of salt per kg of seawater");
+  complains("fluid/air T=300",
+            "quantity: missing; fluid/air gives several; expected one of rho, cp, k, mu, beta, Pr");
+  complains("fluid/air quantity=psat T=300",
+            "quantity: 'psat' is not given by fluid/air; expected one of rho, cp, k, mu, beta, Pr");
+  complains("fluid/air quantity=mu T=300 S=1",
+            "S: not an input of fluid/air; expected T, p (optional)");
+  complains("fluid/watr quantity=mu T=300", "id: 'fluid/watr' is not in the catalogue");
+  complains("fluid/air quantity=mu T=hot", "T: 'hot' is not a finite number");
+}
+
 TEST_CASE("evaluate: bad arguments end with 2 and one line that says which") {
   complains("no/such Re=1", "id: 'no/such' is not in the catalogue");
   complains(tube + " Re=1", "Pr: missing; expected Prandtl number");
@@ -83,9 +122,9 @@ TEST_CASE("evaluate: bad arguments end with 2 and one line that says which") {
 }
 
 TEST_CASE("evaluate: lists") {
-  const auto everything = run("--list");
-  CHECK(everything.code == 0);
-  CHECK(everything.lines().size() == static_cast<std::size_t>(all::count));
+  const auto whole = run("--list");
+  CHECK(whole.code == 0);
+  CHECK(whole.lines().size() == everything);
   const auto spheres = run("--list sphere/");
   CHECK(spheres.lines().size() >= 5);
   for (const std::string& line : spheres.lines()) {
@@ -93,6 +132,10 @@ TEST_CASE("evaluate: lists") {
     CHECK(has(line, "  quantity="));
   }
   CHECK(has(spheres.out, "sphere/whitaker-1972  quantity=Nu_D  Re;Pr;mu_ratio?"));
+  const auto fluids = run("--list fluid/");
+  CHECK(fluids.lines().size() == all_fluids.size());
+  for (const std::string& line : fluids.lines()) CHECK(line.rfind("fluid/", 0) == 0);
+  CHECK(has(fluids.out, "fluid/humid-air  quantity=mu  T;p?;phi"));
   CHECK(run("--list no-such-part").out == "");
   CHECK(has(run("").out, "--batch"));
   CHECK(has(run("--help").out, "--batch"));
@@ -101,10 +144,12 @@ TEST_CASE("evaluate: lists") {
 TEST_CASE("evaluate: the catalogue as documents") {
   const auto list = nlohmann::json::parse(run("--json").out, nullptr, false);
   REQUIRE(list.is_array());
-  CHECK(list.size() == static_cast<std::size_t>(all::count));
+  CHECK(list.size() == everything);
   const auto page = run("--markdown");
   CHECK(page.code == 0);
   CHECK(has(page.out, "### " + tube + " (Nu_D)"));
+  CHECK(has(page.out, "### fluid/water (rho, cp, k, mu, beta, Pr)"));
+  CHECK(has(page.out, "### fluid/sodium (psat)"));
 }
 
 TEST_CASE("evaluate: docs/catalogue.md is what the program writes") {

@@ -45,16 +45,14 @@ second residual(const second& delta, const second& tau) {
 
 // The ideal part, without log(delta): an independent statement of cp0.
 second ideal(const second& tau) {
-  using math::exp;
-  using math::log;
   const second one(1.0);
   const second root = math::sqrt(tau);
   return second(0.605719400e-7 / (tau * tau * tau) - 0.210274769e-4 / (tau * tau) -
                 0.158860716e-3 / tau - 13.841928076 + 17.275266575 * tau -
-                0.195363420e-3 * tau * root + 2.490888032 * log(tau) +
-                0.791309509 * log(second(one - exp(second(-25.36365 * tau)))) +
-                0.212236768 * log(second(one - exp(second(-16.90741 * tau)))) -
-                0.197938904 * log(second(2.0 / 3.0 + exp(second(87.31279 * tau)))));
+                0.195363420e-3 * tau * root + 2.490888032 * math::log(tau) +
+                0.791309509 * math::log(second(one - math::exp(second(-25.36365 * tau)))) +
+                0.212236768 * math::log(second(one - math::exp(second(-16.90741 * tau)))) -
+                0.197938904 * math::log(second(2.0 / 3.0 + math::exp(second(87.31279 * tau)))));
 }
 
 double ideal_heat(double T) {  // J/(mol K)

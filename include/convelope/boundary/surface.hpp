@@ -14,18 +14,19 @@ struct robin {
 };
 
 /// The answer for one wall temperature: flux, slope and all that is known about them.
-/// T is double, or a pack with one wall per lane.
+/// T is double, or a pack with one wall per lane. An answer made in device code has all numbers
+/// and the verdict, but no documents: spoken(), correlation() and fluid() need a host.
 template <class T>
 class wall_answer {
  public:
   CONVELOPE_FUNCTION constexpr wall_answer(const T& wall, const film<dual<T>>& f,
-                                           const speakers& who, const fluid_info* fluid)
+                                           const speakers* who, const fluid_info* fluid)
       : wall_(wall),
         coefficient_(f.coefficient.value),
         reference_(f.reference_temperature.value),
         bits_(f.bits),
         variance_(f.variance),
-        speakers_(&who),
+        speakers_(who),
         fluid_(fluid) {
     for (int i = 0; i < detail::word::slots; ++i) share_[i] = f.share[i];
     const dual<T> q = f.coefficient * (dual<T>::variable(wall) - f.reference_temperature);
@@ -74,7 +75,8 @@ class wall_answer {
  private:
   template <class K>
   CONVELOPE_FUNCTION constexpr estimate<K, T> given(const T& x) const {
-    return estimate<K, T>(x, verdict(), variance_, speakers_->correlation[0], fluid_);
+    const correlation_info* first = speakers_ == nullptr ? nullptr : speakers_->correlation[0];
+    return estimate<K, T>(x, verdict(), variance_, first, fluid_);
   }
 
   T wall_;
@@ -119,7 +121,11 @@ class wall_surface {
   CONVELOPE_FUNCTION constexpr wall_answer<T> answer(const T& wall, const Exposure& e) const {
     using D = dual<T>;
     const film<D> f = geometry_.film_at(fluid_, e.template as<D>(), D::variable(wall));
-    return wall_answer<T>(wall, f, G::speaks, fluid_.info());
+#if defined(__CUDA_ARCH__) || defined(__HIP_DEVICE_COMPILE__)
+    return wall_answer<T>(wall, f, nullptr, nullptr);
+#else
+    return wall_answer<T>(wall, f, &G::speaks, fluid_.info());
+#endif
   }
 
   G geometry_;

@@ -34,9 +34,83 @@ inline std::string bound(double x) {
 inline std::string scatter_text(double s) {
   return s < 0.0 ? "not stated" : "+-" + convelope::detail::short_number(100.0 * s) + " %";
 }
+/// "authors year, where"; a line fitted here has no year.
+inline std::string source_text(const reference& r) {
+  return std::string(r.authors) + (r.year > 0 ? " " + std::to_string(r.year) : "") + ", " + r.where;
+}
+
+/// A fluid's property, rather than a correlation.
+inline bool is_property(const correlation_info& c) {
+  return std::string_view(c.id).substr(0, 6) == "fluid/";
+}
+/// What stands behind the last comma of "density, kg/m3"; "" of a plain number.
+inline std::string_view unit_of(const correlation_info& c) {
+  const std::string_view gives = c.gives;
+  const std::size_t comma = gives.rfind(", ");
+  return comma == std::string_view::npos ? std::string_view() : gives.substr(comma + 2);
+}
+
+/// Properties that one formulation gives on the same inputs in the same range.
+inline bool of_one_kind(const correlation_info& a, const correlation_info& b) {
+  using convelope::detail::same_text;
+  if (!same_text(a.id, b.id) || a.source != b.source || a.input_count != b.input_count ||
+      a.limit_count != b.limit_count) {
+    return false;
+  }
+  for (int i = 0; i < a.input_count; ++i) {
+    if (!same_text(a.inputs[i].key, b.inputs[i].key)) return false;
+  }
+  for (int i = 0; i < a.limit_count; ++i) {
+    const limit_info& x = a.limits[i];
+    const limit_info& y = b.limits[i];
+    if (!same_text(x.symbol, y.symbol) || x.low < y.low || x.low > y.low || x.high < y.high ||
+        x.high > y.high) {
+      return false;
+    }
+  }
+  return true;
+}
+
+inline std::string range_line(const correlation_info& c) {
+  std::string s = "- Range: ";
+  for (int i = 0; i < c.limit_count; ++i) {
+    s += std::string(i > 0 ? "; " : "") + c.limits[i].symbol + " " +
+         convelope::detail::range_text(c.limits[i]);
+  }
+  return s + (c.limit_count == 0 ? "none stated\n" : "\n");
+}
+inline std::string source_lines(const reference& r) {
+  return "- Source: " + source_text(r) + "\n- Constants: " + words(r.constants) + "\n" +
+         (*r.note != 0 ? std::string("- Note: ") + r.note + "\n" : "") + "\n";
+}
+
+/// Properties of one kind as a section of a Markdown page.
+inline std::string properties_to_markdown(std::span<const entry> of_one_kind) {
+  const correlation_info& c = *of_one_kind.front().info;
+  std::string s = std::string("### ") + c.id + " (";
+  for (const entry& e : of_one_kind) {
+    s += std::string(&e == &of_one_kind.front() ? "" : ", ") + e.info->quantity;
+  }
+  s += ")\n\nInputs: ";
+  for (int i = 0; i < c.input_count; ++i) {
+    const input_info& in = c.inputs[i];
+    s += std::string(i > 0 ? "; " : "") + "`" + in.key + "` " + in.words;
+    if (in.optional) {
+      s += in.otherwise > 0.0
+               ? " (" + convelope::detail::short_number(in.otherwise) + " if left out)"
+               : " (optional)";
+    }
+  }
+  s += ".\n\n| quantity | | uncertainty |\n|---|---|---|\n";
+  for (const entry& e : of_one_kind) {
+    s += std::string("| `") + e.info->quantity + "` | " + e.info->gives + " | " +
+         scatter_text(e.info->scatter) + " |\n";
+  }
+  return s + "\n" + range_line(c) + source_lines(*c.source);
+}
 }  // namespace detail
 
-/// One correlation as a JSON object.
+/// One correlation, or one property of a fluid, as a JSON object.
 inline std::string to_json(const correlation_info& c) {
   using detail::json_string;
   std::string s = "{\"id\":" + json_string(c.id) + ",\"quantity\":" + json_string(c.quantity) +
@@ -63,15 +137,15 @@ inline std::string to_json(const correlation_info& c) {
   }
   s += "],\"scatter\":" +
        (c.scatter < 0.0 ? std::string("null") : convelope::detail::short_number(c.scatter)) +
-       ",\"properties\":" + json_string(words(c.state_at)) + ",\"source\":" +
-       json_string(std::string(c.source->authors) + " " + std::to_string(c.source->year) + ", " +
-                   c.source->where) +
+       ",\"properties\":" +
+       (detail::is_property(c) ? std::string("null") : json_string(words(c.state_at))) +
+       ",\"source\":" + json_string(detail::source_text(*c.source)) +
        ",\"constants\":" + json_string(words(c.source->constants)) +
        ",\"note\":" + json_string(c.source->note) + "}";
   return s;
 }
 
-/// The whole list as a JSON array, one correlation a line.
+/// The whole list as a JSON array, one entry a line.
 inline std::string to_json(std::span<const entry> entries) {
   std::string s = "[\n";
   for (const entry& e : entries) {
@@ -97,23 +171,26 @@ inline std::string to_markdown(const correlation_info& c) {
     if (in.optional) s += ", optional";
   }
   if (c.input_count == 0) s += "none";
-  s += ".\n\n- Range: ";
-  for (int i = 0; i < c.limit_count; ++i) {
-    s += std::string(i > 0 ? "; " : "") + c.limits[i].symbol + " " +
-         convelope::detail::range_text(c.limits[i]);
-  }
-  if (c.limit_count == 0) s += "none stated";
-  s += "\n- Scatter: " + detail::scatter_text(c.scatter) + "\n- Properties: " + words(c.state_at) +
-       "\n- Source: " + c.source->authors + " " + std::to_string(c.source->year) + ", " +
-       c.source->where + "\n- Constants: " + words(c.source->constants) + "\n";
-  if (*c.source->note != 0) s += std::string("- Note: ") + c.source->note + "\n";
-  return s + "\n";
+  return s + ".\n\n" + detail::range_line(c) + "- Scatter: " + detail::scatter_text(c.scatter) +
+         "\n- Properties: " + words(c.state_at) + "\n" + detail::source_lines(*c.source);
 }
 
-/// The whole list as Markdown.
+/// The whole list as Markdown; properties that a formulation gives together share a section.
 inline std::string to_markdown(std::span<const entry> entries) {
   std::string s;
-  for (const entry& e : entries) s += to_markdown(*e.info);
+  for (std::size_t i = 0; i < entries.size();) {
+    std::size_t n = 1;
+    if (detail::is_property(*entries[i].info)) {
+      while (i + n < entries.size() &&
+             detail::of_one_kind(*entries[i].info, *entries[i + n].info)) {
+        ++n;
+      }
+      s += detail::properties_to_markdown(entries.subspan(i, n));
+    } else {
+      s += to_markdown(*entries[i].info);
+    }
+    i += n;
+  }
   return s;
 }
 

@@ -127,15 +127,16 @@ constexpr const char* const* choices_of() {
   }
 }
 
-/// A correlation's inputs as data: keys from its own list if it has one, else from the kinds.
 template <class C>
-inline constexpr auto input_table = C::with_input_kinds([]<class... K>() {
-  constexpr std::size_t n = sizeof...(K);
-  std::array<input_info, (n == 0 ? 1 : n)> table{
-      {input_info{key_of<K>(), K::symbol, K::words, on_of<K>(), choices_of<K>(), 0.0, false}...}};
-  for (std::size_t i = 0; i < n; ++i) {
-    if constexpr (requires { C::keys; }) table[i].key = C::keys[i];
-    if constexpr (requires { C::otherwise; }) {
+constexpr void rename_keys(input_info* table, std::size_t n) {
+  if constexpr (requires { C::keys; }) {
+    for (std::size_t i = 0; i < n; ++i) table[i].key = C::keys[i];
+  }
+}
+template <class C>
+constexpr void set_defaults(input_info* table, std::size_t n) {
+  if constexpr (requires { C::otherwise; }) {
+    for (std::size_t i = 0; i < n; ++i) {
       for (const input_default& d : C::otherwise) {
         if (same_text(d.key, table[i].key)) {
           table[i].optional = true;
@@ -144,6 +145,16 @@ inline constexpr auto input_table = C::with_input_kinds([]<class... K>() {
       }
     }
   }
+}
+
+/// A correlation's inputs as data: keys from its own list if it has one, else from the kinds.
+template <class C>
+inline constexpr auto input_table = C::with_input_kinds([]<class... K>() {
+  constexpr std::size_t n = sizeof...(K);
+  std::array<input_info, (n == 0 ? 1 : n)> table{
+      {input_info{key_of<K>(), K::symbol, K::words, on_of<K>(), choices_of<K>(), 0.0, false}...}};
+  rename_keys<C>(table.data(), n);
+  set_defaults<C>(table.data(), n);
   return table;
 });
 
@@ -171,15 +182,42 @@ struct correlation;
 namespace detail {
 /// What a formula is written with, in reach of every correlation without widening the namespace.
 struct formula_functions {
-  static constexpr auto sqrt = math::sqrt;
-  static constexpr auto cbrt = math::cbrt;
-  static constexpr auto exp = math::exp;
-  static constexpr auto log = math::log;
-  static constexpr auto pow = math::pow;
-  static constexpr auto select = math::select;
-  static constexpr auto smaller = math::smaller;
-  static constexpr auto larger = math::larger;
-  static constexpr auto square = math::square;
+  template <class T>
+  CONVELOPE_FUNCTION static constexpr T sqrt(const T& x) {
+    return math::sqrt(x);
+  }
+  template <class T>
+  CONVELOPE_FUNCTION static constexpr T cbrt(const T& x) {
+    return math::cbrt(x);
+  }
+  template <class T>
+  CONVELOPE_FUNCTION static constexpr T exp(const T& x) {
+    return math::exp(x);
+  }
+  template <class T>
+  CONVELOPE_FUNCTION static constexpr T log(const T& x) {
+    return math::log(x);
+  }
+  template <class T>
+  CONVELOPE_FUNCTION static constexpr T square(const T& x) {
+    return math::square(x);
+  }
+  template <class T>
+  CONVELOPE_FUNCTION static constexpr T pow(const T& x, const T& y) {
+    return math::pow(x, y);
+  }
+  template <class T>
+  CONVELOPE_FUNCTION static constexpr T smaller(const T& a, const T& b) {
+    return math::smaller(a, b);
+  }
+  template <class T>
+  CONVELOPE_FUNCTION static constexpr T larger(const T& a, const T& b) {
+    return math::larger(a, b);
+  }
+  template <class Mask, class T>
+  CONVELOPE_FUNCTION static constexpr T select(const Mask& m, const T& yes, const T& no) {
+    return math::select(m, yes, no);
+  }
   template <int P, int Q = 1, class T>
   CONVELOPE_FUNCTION static constexpr T power(const T& x) {
     return math::power<P, Q>(x);
@@ -228,7 +266,8 @@ struct correlation_on : formula_functions {
     using P = plain_t<T>;
     using bits = bits_t<T>;
 
-    bits seen = Self::envelope.template check<T, Inputs...>(detail::tested<T, Inputs>(in)...);
+    constexpr auto envelope = Self::envelope;  // its own, for device code
+    bits seen = envelope.template check<T, Inputs...>(detail::tested<T, Inputs>(in)...);
     ((seen = bits(seen | finite_bits<T, Inputs>(in))), ...);
     ((seen = bits(seen | inherited<T>(in))), ...);
     if (Self::scatter < 0.0) seen = bits(seen | bits(word::scatter_not_stated));

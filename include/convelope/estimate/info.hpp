@@ -39,11 +39,14 @@ inline constexpr double not_stated = -1.0;
 
 /// Which state a formula's fluid properties belong to.
 enum class state_rule : unsigned char {
-  film,           // mean of wall and stream
-  bulk,           // mixing-cup mean of the duct flow
-  free_stream,    // undisturbed
-  mean_of_walls,  // between two walls
-  none            // no properties enter
+  film,                   // mean of wall and stream
+  bulk,                   // mixing-cup mean of the duct flow
+  free_stream,            // undisturbed
+  free_stream_with_wall,  // undisturbed, the wall entering through a ratio of properties
+  wall,                   // at the wall itself
+  eckert,                 // 0.28 stream + 0.50 wall + 0.22 adiabatic wall
+  mean_of_walls,          // between two walls
+  none                    // no properties enter
 };
 
 constexpr const char* words(state_rule r) {
@@ -54,6 +57,12 @@ constexpr const char* words(state_rule r) {
       return "bulk temperature";
     case state_rule::free_stream:
       return "free-stream temperature";
+    case state_rule::free_stream_with_wall:
+      return "free-stream temperature, a property ratio for the wall";
+    case state_rule::wall:
+      return "wall temperature";
+    case state_rule::eckert:
+      return "Eckert's reference temperature";
     case state_rule::mean_of_walls:
       return "mean of the two walls";
     case state_rule::none:

@@ -1,6 +1,8 @@
 #ifndef CONVELOPE_FLUIDS_FLUID_HPP
 #define CONVELOPE_FLUIDS_FLUID_HPP
 
+#include <array>
+
 #include "convelope/estimate/estimate.hpp"
 #include "convelope/kinds.hpp"
 
@@ -40,6 +42,15 @@ concept fluid = requires(const Fluid& f, const double& x) {
   { f.info() } -> std::convertible_to<const fluid_info*>;
   { Fluid::expansion_at } -> std::convertible_to<expansion_rule>;
 };
+
+namespace detail {
+/// A fluid's list of limits as constants of the function that asks: device code has no others.
+template <std::size_t Count>
+CONVELOPE_FUNCTION constexpr std::array<limit_info, Count> constants_of(
+    const limit_info (&list)[Count]) {
+  return std::to_array(list);
+}
+}  // namespace detail
 
 /// The verdict bits of limit number i of a fluid: low <= x <= high.
 template <class T>

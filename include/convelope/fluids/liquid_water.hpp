@@ -55,7 +55,7 @@ struct liquid_water {
   template <class T>
   CONVELOPE_FUNCTION constexpr bits_t<T> check(const T& temperature_K, const T& pressure_Pa) const {
     using adaptor = scalar_adaptor<T>;
-    const auto& limits = detail::liquid_water_limits;
+    constexpr auto limits = detail::constants_of(detail::liquid_water_limits);
     const T cold = adaptor::constant(limits[0].low);
     const T hot = adaptor::constant(limits[0].high);
     // The saturation line ends where the temperature limits do; NaN counts as cold here.

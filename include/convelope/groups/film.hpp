@@ -8,7 +8,21 @@
 namespace convelope {
 inline namespace v0 {
 
+namespace kinds {
+/// A Nusselt number or friction factor that a property ratio has brought from constant properties
+/// to those before a hot or cold wall: groups/property_ratio.hpp. Another kind, so that no second
+/// ratio fits.
+template <class K>
+struct corrected : K {
+  using uncorrected = K;
+};
+}  // namespace kinds
+
 namespace detail {
+template <class A, class Number>
+constexpr bool is_plain_or_corrected =
+    is_of_kind<A, Number> || is_of_kind<A, kinds::corrected<Number>>;
+
 // What a film coefficient of kind H is made from: a quantity, or a Nusselt number, a conductivity
 // and the length the Nusselt number is based on.
 template <class H, template <class> class Nu, class... A>
@@ -18,7 +32,7 @@ constexpr bool makes_film<H, Nu, boost::units::quantity<typename H::unit_type, T
 template <class H, template <class> class Nu, class Number, class K, class L>
   requires(is_length<L>)
 constexpr bool makes_film<H, Nu, Number, K, L> =
-    is_of_kind<Number, Nu<typename L::kind_type>> && is_of_kind<K, kinds::conductivity>;
+    is_plain_or_corrected<Number, Nu<typename L::kind_type>> && is_of_kind<K, kinds::conductivity>;
 
 // One call operator, so that a compiler's complaint lists one candidate.
 template <class H, template <class> class Nu>
@@ -63,7 +77,7 @@ CONVELOPE_FUNCTION constexpr auto nusselt(const H& h, const L& l, const K& k) {
 /// St = Nu / (Re Pr), Nu and Re on the same length.
 template <class Number, class R, class P>
   requires(detail::is_a_reynolds<R> && detail::is_of_kind<P, kinds::prandtl> &&
-           detail::is_of_kind<Number, kinds::nusselt<detail::length_behind<R>>>)
+           detail::is_plain_or_corrected<Number, kinds::nusselt<detail::length_behind<R>>>)
 CONVELOPE_FUNCTION constexpr auto stanton(const Number& Nu, const R& Re, const P& Pr) {
   using T = detail::number_type<Number, R, P>;
   return detail::carried<kinds::stanton<detail::length_behind<R>>, T>(

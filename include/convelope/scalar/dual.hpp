@@ -51,7 +51,7 @@ class dual {
   }
   template <class S>
     requires(!std::is_same_v<S, T> && detail::constant_beside<S, T>)
-  CONVELOPE_FUNCTION constexpr dual(const S& v) : dual(T(detail::as<T>(v))) {}  // NOLINT
+  CONVELOPE_FUNCTION constexpr dual(S v) : dual(T(detail::as<T>(v))) {}  // NOLINT
 
   /// The variable itself: derivative 1 in direction k, 0 in the others.
   CONVELOPE_FUNCTION static constexpr dual variable(const T& v, int k = 0) {
@@ -79,42 +79,43 @@ class dual {
     return a.chain(T(-a.value), [](const T& x) { return T(-x); });
   }
 
-  // Constants have no slope: these save the products with zero.
+  // Constants have no slope: these save the products with zero. By value, so that device code may
+  // use static constants.
   template <detail::constant_beside<T> S>
-  CONVELOPE_FUNCTION friend constexpr dual operator+(const dual& a, const S& b) {
+  CONVELOPE_FUNCTION friend constexpr dual operator+(const dual& a, S b) {
     dual r = a;
     r.value = T(a.value + detail::as<T>(b));
     return r;
   }
   template <detail::constant_beside<T> S>
-  CONVELOPE_FUNCTION friend constexpr dual operator+(const S& a, const dual& b) {
+  CONVELOPE_FUNCTION friend constexpr dual operator+(S a, const dual& b) {
     return b + a;
   }
   template <detail::constant_beside<T> S>
-  CONVELOPE_FUNCTION friend constexpr dual operator-(const dual& a, const S& b) {
+  CONVELOPE_FUNCTION friend constexpr dual operator-(const dual& a, S b) {
     dual r = a;
     r.value = T(a.value - detail::as<T>(b));
     return r;
   }
   template <detail::constant_beside<T> S>
-  CONVELOPE_FUNCTION friend constexpr dual operator-(const S& a, const dual& b) {
+  CONVELOPE_FUNCTION friend constexpr dual operator-(S a, const dual& b) {
     return b.chain(T(detail::as<T>(a) - b.value), [](const T& x) { return T(-x); });
   }
   template <detail::constant_beside<T> S>
-  CONVELOPE_FUNCTION friend constexpr dual operator*(const dual& a, const S& b) {
+  CONVELOPE_FUNCTION friend constexpr dual operator*(const dual& a, S b) {
     const T& c = detail::as<T>(b);
     return a.chain(T(a.value * c), [&](const T& x) { return T(x * c); });
   }
   template <detail::constant_beside<T> S>
-  CONVELOPE_FUNCTION friend constexpr dual operator*(const S& a, const dual& b) {
+  CONVELOPE_FUNCTION friend constexpr dual operator*(S a, const dual& b) {
     return b * a;
   }
   template <detail::constant_beside<T> S>
-  CONVELOPE_FUNCTION friend constexpr dual operator/(const dual& a, const S& b) {
+  CONVELOPE_FUNCTION friend constexpr dual operator/(const dual& a, S b) {
     return a * T(detail::as<T>(1.0) / detail::as<T>(b));
   }
   template <detail::constant_beside<T> S>
-  CONVELOPE_FUNCTION friend constexpr dual operator/(const S& a, const dual& b) {
+  CONVELOPE_FUNCTION friend constexpr dual operator/(S a, const dual& b) {
     const T r = T(detail::as<T>(1.0) / b.value);
     const T q = T(detail::as<T>(a) * r);
     const T k = T(-q * r);
@@ -172,7 +173,8 @@ struct scalar_adaptor<dual<T, Size>> {
   }
   CONVELOPE_FUNCTION static D sqrt(const D& x) {
     const T v = scalar_adaptor<T>::sqrt(x.value);
-    return scaled(x, v, [&] { return T(detail::as<T>(0.5) / v); });
+    // 1/v, which powers of the root share
+    return scaled(x, v, [&] { return T(detail::as<T>(0.5) * T(detail::as<T>(1.0) / v)); });
   }
   CONVELOPE_FUNCTION static D cbrt(const D& x) {
     const T v = scalar_adaptor<T>::cbrt(x.value);

@@ -20,74 +20,45 @@ concept scalar = !std::is_integral_v<T> && std::is_constructible_v<T, double> &&
                    scalar_adaptor<T>::sqrt(a);
                  };
 
-// Function objects, so that argument-dependent lookup can't prefer a slower or ambiguous overload.
+// Call them qualified, or as members of a correlation's base: argument-dependent lookup could
+// prefer a slower or ambiguous overload.
 namespace math {
-namespace detail {
-struct sqrt_function {
-  template <class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const T& x) const {
-    return scalar_adaptor<T>::sqrt(x);
-  }
-};
-struct cbrt_function {
-  template <class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const T& x) const {
-    return scalar_adaptor<T>::cbrt(x);
-  }
-};
-struct exp_function {
-  template <class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const T& x) const {
-    return scalar_adaptor<T>::exp(x);
-  }
-};
-struct log_function {
-  template <class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const T& x) const {
-    return scalar_adaptor<T>::log(x);
-  }
-};
-struct pow_function {
-  template <class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const T& x, const T& y) const {
-    return scalar_adaptor<T>::pow(x, y);
-  }
-};
-struct select_function {
-  template <class Mask, class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const Mask& m, const T& yes, const T& no) const {
-    return scalar_adaptor<T>::select(m, yes, no);
-  }
-};
-struct smaller_function {
-  template <class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const T& a, const T& b) const {
-    return scalar_adaptor<T>::select(b < a, b, a);
-  }
-};
-struct larger_function {
-  template <class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const T& a, const T& b) const {
-    return scalar_adaptor<T>::select(a < b, b, a);
-  }
-};
-struct square_function {
-  template <class T>
-  CONVELOPE_FUNCTION constexpr T operator()(const T& x) const {
-    return T(x * x);
-  }
-};
-}  // namespace detail
-
-inline constexpr detail::sqrt_function sqrt{};
-inline constexpr detail::cbrt_function cbrt{};
-inline constexpr detail::exp_function exp{};
-inline constexpr detail::log_function log{};
-inline constexpr detail::pow_function pow{};
-inline constexpr detail::select_function select{};
-inline constexpr detail::smaller_function smaller{};
-inline constexpr detail::larger_function larger{};
-inline constexpr detail::square_function square{};
+template <class T>
+CONVELOPE_FUNCTION constexpr T sqrt(const T& x) {
+  return scalar_adaptor<T>::sqrt(x);
+}
+template <class T>
+CONVELOPE_FUNCTION constexpr T cbrt(const T& x) {
+  return scalar_adaptor<T>::cbrt(x);
+}
+template <class T>
+CONVELOPE_FUNCTION constexpr T exp(const T& x) {
+  return scalar_adaptor<T>::exp(x);
+}
+template <class T>
+CONVELOPE_FUNCTION constexpr T log(const T& x) {
+  return scalar_adaptor<T>::log(x);
+}
+template <class T>
+CONVELOPE_FUNCTION constexpr T pow(const T& x, const T& y) {
+  return scalar_adaptor<T>::pow(x, y);
+}
+template <class Mask, class T>
+CONVELOPE_FUNCTION constexpr T select(const Mask& m, const T& yes, const T& no) {
+  return scalar_adaptor<T>::select(m, yes, no);
+}
+template <class T>
+CONVELOPE_FUNCTION constexpr T smaller(const T& a, const T& b) {
+  return scalar_adaptor<T>::select(b < a, b, a);
+}
+template <class T>
+CONVELOPE_FUNCTION constexpr T larger(const T& a, const T& b) {
+  return scalar_adaptor<T>::select(a < b, b, a);
+}
+template <class T>
+CONVELOPE_FUNCTION constexpr T square(const T& x) {
+  return T(x * x);
+}
 }  // namespace math
 
 /// The number without its derivatives (a pack keeps its lanes).

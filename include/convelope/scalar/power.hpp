@@ -33,9 +33,9 @@ CONVELOPE_FUNCTION constexpr T whole_power(const T& x) {
 template <int Squares, int Cubes, class T>
 CONVELOPE_FUNCTION constexpr T root(const T& x) {
   if constexpr (Squares > 0) {
-    return root<Squares - 1, Cubes>(sqrt(x));
+    return root<Squares - 1, Cubes>(math::sqrt(x));
   } else if constexpr (Cubes > 0) {
-    return root<Squares, Cubes - 1>(cbrt(x));
+    return root<Squares, Cubes - 1>(math::cbrt(x));
   } else {
     return x;
   }
@@ -61,7 +61,7 @@ CONVELOPE_FUNCTION constexpr T positive_power(const T& x) {
   } else if constexpr (by_roots) {
     return whole_power<P>(root<twos, threes>(x));
   } else {
-    return exp(T(log(x) * ratio<T>(P, Q)));
+    return math::exp(T(math::log(x) * ratio<T>(P, Q)));
   }
 }
 }  // namespace detail

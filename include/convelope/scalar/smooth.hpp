@@ -1,7 +1,7 @@
 #ifndef CONVELOPE_SCALAR_SMOOTH_HPP
 #define CONVELOPE_SCALAR_SMOOTH_HPP
 
-#include "convelope/scalar/power.hpp"
+#include "convelope/scalar/dual.hpp"
 
 namespace convelope {
 inline namespace v0 {
@@ -10,7 +10,14 @@ namespace math {
 /// |x| rounded off near zero: sqrt(x^2 + r^2). Finite value and slope at x = 0.
 template <class T>
 CONVELOPE_FUNCTION constexpr T smooth_magnitude(const T& x, double r) {
-  return sqrt(T(x * x + r * r));
+  return math::sqrt(T(x * x + r * r));
+}
+template <class T, int Size>  // the same with fewer products
+  requires(Size > 0)
+CONVELOPE_FUNCTION constexpr dual<T, Size> smooth_magnitude(const dual<T, Size>& x, double r) {
+  const T v = smooth_magnitude(x.value, r);
+  const T k = T(x.value * T(scalar_adaptor<T>::constant(1.0) / v));
+  return x.chain(v, [&](const T& s) { return T(k * s); });
 }
 
 /// -1 .. 1 with a finite slope at zero: x / sqrt(x^2 + r^2).
@@ -23,7 +30,7 @@ CONVELOPE_FUNCTION constexpr T smooth_sign(const T& x, double r) {
 template <class T>
 CONVELOPE_FUNCTION constexpr T hand_over(const T& x, double from, double to) {
   const T s = T((x - from) * (1.0 / (to - from)));
-  const T t = smaller(larger(s, T(0.0)), T(1.0));
+  const T t = math::smaller(math::larger(s, T(0.0)), T(1.0));
   return T(t * t * t * (10.0 + t * (6.0 * t - 15.0)));
 }
 

@@ -48,14 +48,15 @@ struct buoyancy {
     const T per_beta = T(k * dT * at_film.density * at_film.density * at_film.specific_heat /
                          (at_film.viscosity * at_film.conductivity));
     const T given = T(per_beta * expansion_by_rule(f, at_film, ambient, p));
-    T square = T(given * given + least_rayleigh * least_rayleigh);
     if constexpr (requires { Fluid::expansion_slope; }) {
+      const T square = T(given * given + least_rayleigh * least_rayleigh);
       const T least = T(per_beta * dT * (0.125 * Fluid::expansion_slope));
       const T other = T(least * least);
-      square = T(square + other * (other / (square + other)));
+      Ra = math::sqrt(T(square + other * (other / (square + other))));
+    } else {
+      Ra = math::smooth_magnitude(given, least_rayleigh);
     }
-    Ra = math::sqrt(square);
-    side = T(given / math::sqrt(T(square + side_rayleigh * side_rayleigh)));
+    side = T(given / math::smooth_magnitude(Ra, side_rayleigh));
   }
 };
 

@@ -61,8 +61,10 @@ template <class C, class T, class... X>
 CONVELOPE_FUNCTION constexpr bits_t<T> asked(int slot, const plain_t<T>& share, const X&... x) {
   using bits = bits_t<T>;
   using P = plain_t<T>;
-  const bits crossed = C::with_input_kinds(
-      [&]<class... K>() { return C::envelope.template check<P, K...>(without_slope<P>(x)...); });
+  const bits crossed = C::with_input_kinds([&]<class... K>() {
+    constexpr auto envelope = C::envelope;  // its own, for device code
+    return envelope.template check<P, K...>(without_slope<P>(x)...);
+  });
   bits all(crossed << (slot * word::slot_width));
   if (C::scatter < 0.0) all = bits(all | bits(word::scatter_not_stated));
   return bits(all & scalar_adaptor<P>::bits_where(share > scalar_adaptor<P>::constant(heard_from),

@@ -101,7 +101,7 @@ struct region1_powers {
 /// sum of weight n a^(i-1) b^j over the terms with i >= 1.
 template <class Derivative, class T>
 CONVELOPE_FUNCTION constexpr T region1_sum(const region1_powers<T>& w) {
-  constexpr const auto& k = region1_coefficients<Derivative>;
+  constexpr auto k = region1_coefficients<Derivative>;
   const T of1 = T(k[9] * w.c9 + k[10] * w.c7 + k[11] * w.c + k[12] + k[13] * w.b + k[14] * w.b3);
   const T of2 = T(k[15] * w.c3 + k[16] + k[17] * w.b + k[18] * w.b3 + k[19] * w.b17);
   const T of3 = T(k[20] * w.c4 + k[21] + k[22] * w.b6);
@@ -117,7 +117,7 @@ CONVELOPE_FUNCTION constexpr T region1_sum(const region1_powers<T>& w) {
 /// b^2 gamma_tautau.
 template <class T>
 CONVELOPE_FUNCTION constexpr T region1_tau_tau(const region1_powers<T>& w) {
-  constexpr const auto& k = region1_coefficients<by_tau_tau>;
+  constexpr auto k = region1_coefficients<by_tau_tau>;
   const T of0 =
       T(k[1] * w.c2 + k[2] * w.c + k[5] * w.b2 + k[6] * w.b3 + (k[7] + k[8] * w.b) * (w.b2 * w.b2));
   return T(of0 + w.a * region1_sum<by_tau_tau>(w));
