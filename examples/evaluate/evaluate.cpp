@@ -1,4 +1,5 @@
-// Any correlation of the catalogue, from the command line or in batches.
+// Any correlation of the catalogue and any property of its fluids, from the command line or in
+// batches.
 
 #include <iostream>
 #include <string>
@@ -11,7 +12,8 @@ constexpr const char* usage =
     "evaluate --list [PART]          the catalogue, a line each (ids that contain PART)\n"
     "evaluate ID key=value ...       one value with its verdict, scatter and source\n"
     "evaluate --batch                lines `ID quantity=Q;key=value;...` in, JSON lines out\n"
-    "evaluate --json | --markdown    the catalogue as a document\n";
+    "evaluate --json | --markdown    the catalogue as a document\n"
+    "Ids of fluids begin with fluid/: evaluate fluid/water quantity=mu T=300 p=3e6\n";
 
 void list(const std::string& part) {
   namespace cat = convelope::catalogue;
@@ -44,7 +46,14 @@ int complain(const std::string& error) {
   return 2;
 }
 
+std::string verdict_words(const evaluate::outcome& o) {
+  std::string crossed = convelope::explain(o.answer.verdict, *o.entry->info);
+  if (!crossed.empty()) return crossed;
+  return o.answer.verdict.inside() ? "Inside every stated range." : "An input is not possible.";
+}
+
 int one(int argc, char** argv) {
+  namespace cat = convelope::catalogue;
   evaluate::request r;
   r.id = argv[1];
   for (int i = 2; i < argc; ++i) {
@@ -55,13 +64,20 @@ int one(int argc, char** argv) {
   if (!o.error.empty()) return complain(o.error);
   const convelope::correlation_info& c = *o.entry->info;
   std::cout.precision(12);
-  std::cout << c.quantity << " = " << o.answer.value << '\n';
-  const std::string crossed = convelope::explain(o.answer.verdict, c);
-  std::cout << (crossed.empty() ? "Inside every stated range." : crossed) << '\n'
-            << "Scatter: " << convelope::catalogue::detail::scatter_text(c.scatter) << '\n'
-            << "Properties: " << convelope::words(c.state_at) << '\n'
-            << "Source: " << c.source->authors << ' ' << c.source->year << ", " << c.source->where
-            << " (constants " << convelope::words(c.source->constants) << ")\n";
+  const bool property = cat::detail::is_property(c);
+  std::cout << c.quantity << " = " << o.answer.value;
+  if (property) {
+    const std::string_view unit = cat::detail::unit_of(c);
+    const std::string_view words = c.gives;
+    std::cout << (unit.empty() ? "" : " ") << unit << "  ("
+              << words.substr(0, words.size() - (unit.empty() ? 0 : unit.size() + 2)) << ')';
+  }
+  std::cout << '\n' << verdict_words(o) << '\n';
+  std::cout << (property ? "Uncertainty: " : "Scatter: ") << cat::detail::scatter_text(c.scatter)
+            << '\n';
+  if (!property) std::cout << "Properties: " << convelope::words(c.state_at) << '\n';
+  std::cout << "Source: " << cat::detail::source_text(*c.source) << " (constants "
+            << convelope::words(c.source->constants) << ")\n";
   if (*c.source->note != 0) std::cout << "Note: " << c.source->note << '\n';
   return 0;
 }

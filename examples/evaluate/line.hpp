@@ -30,7 +30,7 @@ struct outcome {
   std::string error;  // empty if there is an answer
 };
 
-/// The whole catalogue. The one place that reads every correlation's header.
+/// The whole catalogue: correlations, then fluids. The one place that reads all their headers.
 std::span<const convelope::catalogue::entry> catalogue();
 
 /// "key=value" pairs to a request; returns a sentence on the first bad pair, else "".
@@ -39,7 +39,7 @@ std::string add_pair(std::string_view text, request& r);
 /// A batch line `ID quantity=Q;key=value;key=value`.
 std::string parse_line(std::string_view line, request& r);
 
-/// Looks the correlation up and evaluates it.
+/// Looks the entry up and evaluates it.
 outcome answer(const request& r);
 
 /// {"id", "quantity", "value", "inside", "crossed", "scatter", "error"} on one line.

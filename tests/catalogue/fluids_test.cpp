@@ -34,9 +34,9 @@ const limit_info* limit_on(const correlation_info& c, const std::string& key) {
 
 bool is_finite(double x) { return scalar_adaptor<double>::bits_where_not_finite(x, 1) == 0; }
 
-/// Numbers to try for an input: across its limit and well beyond, and for p and rho those of gases
+/// Numbers for an input: across its limit and well beyond, and for p and rho those of gases
 /// and liquids.
-inputs to_try(const correlation_info& c, const input_info& in) {
+inputs numbers_for(const correlation_info& c, const input_info& in) {
   const std::string key = in.key;
   inputs x{in.otherwise};
   if (key == "p") x.insert(x.end(), {1.0, 500.0, 2e4, 101325.0, 1e6, 5e6, 2e7, 9e7});
@@ -54,7 +54,7 @@ inputs to_try(const correlation_info& c, const input_info& in) {
 template <class Act>
 void each_state(const correlation_info& c, Act act) {
   std::vector<inputs> choices;
-  for (int i = 0; i < c.input_count; ++i) choices.push_back(to_try(c, c.inputs[i]));
+  for (int i = 0; i < c.input_count; ++i) choices.push_back(numbers_for(c, c.inputs[i]));
   std::vector<std::size_t> at(choices.size(), 0);
   for (;;) {
     inputs x;

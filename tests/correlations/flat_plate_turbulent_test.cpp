@@ -152,9 +152,10 @@ TEST_CASE("turbulent plate: records") {
   expect_record<mixed_average>("flat-plate/mixed-average", "Nu_L", 0.25, film);
   expect_record<petukhov_gnielinski_turbulent_average>(
       "flat-plate/petukhov-gnielinski-turbulent-average", "Nu_L", not_stated,
-      state_rule::free_stream);
+      state_rule::free_stream_with_wall);
   expect_record<gnielinski_1975_combined_average>("flat-plate/gnielinski-1975-combined-average",
-                                                  "Nu_L", not_stated, state_rule::free_stream);
+                                                  "Nu_L", not_stated,
+                                                  state_rule::free_stream_with_wall);
   expect_keys<mixed_average>("Re", "Pr", "Re_c");
 }
 

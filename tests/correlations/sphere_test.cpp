@@ -70,7 +70,8 @@ TEST_CASE("sphere: every number type") {
 }
 
 TEST_CASE("sphere: records") {
-  expect_record<whitaker_1972>("sphere/whitaker-1972", "Nu_D", 0.3, state_rule::free_stream);
+  expect_record<whitaker_1972>("sphere/whitaker-1972", "Nu_D", 0.3,
+                               state_rule::free_stream_with_wall);
   expect_record<ranz_marshall_1952>("sphere/ranz-marshall-1952", "Nu_D", not_stated,
                                     state_rule::film);
   // mu_ratio may be left out, and then is 1

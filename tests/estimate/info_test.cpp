@@ -18,10 +18,11 @@ static_assert(reference{"a", 1, "b", known::quoted}.note[0] == 0);
 TEST_CASE("every rule and every degree of knowing has words of its own") {
   std::set<std::string_view> seen;
   for (const state_rule r : {state_rule::film, state_rule::bulk, state_rule::free_stream,
-                             state_rule::mean_of_walls, state_rule::none}) {
+                             state_rule::free_stream_with_wall, state_rule::wall,
+                             state_rule::eckert, state_rule::mean_of_walls, state_rule::none}) {
     seen.insert(words(r));
   }
-  CHECK(seen.size() == 5);
+  CHECK(seen.size() == 8);
   CHECK(seen.count("film temperature") == 1);
   CHECK(seen.count("no properties") == 1);
   seen.clear();

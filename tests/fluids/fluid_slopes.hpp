@@ -59,6 +59,18 @@ void against_50_digits(const Fluid& f, double T, double p, double noise) {
   });
 }
 
+/// The expansion coefficient is -(1/rho)(d rho/dT)_p, which may pass through zero; both come from
+/// the same terms, whose weights are rounded to double one by one.
+template <class Fluid>
+void expansion_is_of_density(const Fluid& f, double T, double p, double noise) {
+  CAPTURE(T);
+  CAPTURE(p);
+  const auto v = f.values(precise(T), precise(p));
+  const precise expected = -slope(f, T, p, false).density / v.density;
+  CHECK(close_to(static_cast<double>(v.expansion), static_cast<double>(expected), 5.0 * noise,
+                 5.0 * noise / T));
+}
+
 /// The expansion coefficient is -(1/rho)(d rho/dT)_p, and (d cp/dp)_T = -T (d2 v/dT2)_p.
 template <class Fluid>
 void thermodynamically_consistent(const Fluid& f, double T, double p, double relative) {

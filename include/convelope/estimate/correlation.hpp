@@ -82,20 +82,12 @@ CONVELOPE_FUNCTION constexpr X clamped(const Envelope& envelope, const X& x) {
     return x;
   } else {
     X y = x;
-    std::apply(
-        [&](const auto&... l) {
-          ((y =
-                [&] {
-                  if constexpr (std::remove_cvref_t<decltype(l)>::template bounds<K>) {
-                    return math::smaller(math::larger(y, scalar_adaptor<X>::constant(l.low)),
-                                         scalar_adaptor<X>::constant(l.high));
-                  } else {
-                    return y;
-                  }
-                }()),
-           ...);
-        },
-        envelope.limits);
+    envelope.limits.each([&](const auto& l) {
+      if constexpr (std::remove_cvref_t<decltype(l)>::template bounds<K>) {
+        y = math::smaller(math::larger(y, scalar_adaptor<X>::constant(l.low)),
+                          scalar_adaptor<X>::constant(l.high));
+      }
+    });
     return y;
   }
 }
@@ -159,12 +151,12 @@ inline constexpr auto input_table = C::with_input_kinds([]<class... K>() {
 });
 
 template <class C>
-inline constexpr auto limit_table = std::apply(
-    [](const auto&... l) {
-      constexpr std::size_t n = sizeof...(l);
-      return std::array<limit_info, (n == 0 ? 1 : n)>{{limit_info{l.symbol, l.low, l.high}...}};
-    },
-    C::envelope.limits);
+inline constexpr auto limit_table = [] {
+  std::array<limit_info, (C::envelope.count == 0 ? 1 : C::envelope.count)> table{};
+  std::size_t i = 0;
+  C::envelope.limits.each([&](const auto& l) { table[i++] = {l.symbol, l.low, l.high}; });
+  return table;
+}();
 
 template <class C>
 inline constexpr correlation_info record_of{

@@ -1,8 +1,6 @@
 #ifndef CONVELOPE_ESTIMATE_ENVELOPE_HPP
 #define CONVELOPE_ESTIMATE_ENVELOPE_HPP
 
-#include <tuple>
-
 #include "convelope/estimate/info.hpp"
 #include "convelope/estimate/verdict.hpp"
 #include "convelope/kinds/typed.hpp"
@@ -19,6 +17,15 @@ constexpr int index_of_kind() {
   return found;
 }
 
+template <int I, class First, class... Rest>
+CONVELOPE_FUNCTION constexpr auto nth(const First& first, const Rest&... rest) {
+  if constexpr (I == 0) {
+    return first;
+  } else {
+    return nth<I - 1>(rest...);
+  }
+}
+
 template <class K>
 struct limit_on_input {
   double low;
@@ -28,7 +35,7 @@ struct limit_on_input {
   template <class... Ks, class... X>
   CONVELOPE_FUNCTION constexpr auto number(const X&... x) const {
     constexpr int i = among<Ks...> ? index_of_kind<K, Ks...>() : 0;
-    return std::get<static_cast<std::size_t>(i)>(std::tie(x...));
+    return nth<i>(x...);
   }
   template <class... Ks>
   static constexpr bool among = index_of_kind<K, Ks...>() >= 0;
@@ -67,31 +74,55 @@ constexpr auto limit_on(const char* symbol, double low, double high, Group group
   return detail::limit_on_group<Group>{symbol, low, high, group};
 }
 
+namespace detail {
+// Limits one after the other. A std::tuple makes a geometry's header a tenth dearer to include.
+template <class... Limits>
+struct limit_chain {
+  template <class Use>
+  CONVELOPE_FUNCTION constexpr void each(Use) const {}
+};
+template <class First, class... Rest>
+struct limit_chain<First, Rest...> {
+  First first;
+  limit_chain<Rest...> rest;
+  template <class Use>
+  CONVELOPE_FUNCTION constexpr void each(Use use) const {
+    use(first);
+    rest.each(use);
+  }
+};
+template <class First, class... Rest>
+constexpr limit_chain<First, Rest...> chain_of(const First& first, const Rest&... rest) {
+  if constexpr (sizeof...(Rest) == 0) {
+    return {first, {}};
+  } else {
+    return {first, chain_of(rest...)};
+  }
+}
+}  // namespace detail
+
 /// The range a formula was fitted in: up to six limits, tested in the caller's own numbers.
 template <class... Limits>
 struct envelope_of {
   static_assert(sizeof...(Limits) <= detail::word::limits_per_slot, "at most six limits");
   static constexpr int count = static_cast<int>(sizeof...(Limits));
-  std::tuple<Limits...> limits;
+  detail::limit_chain<Limits...> limits;
 
   /// Verdict bits (in slot 0) for inputs x of kinds Ks, as numbers of type T.
   template <class T, class... Ks, class... X>
   CONVELOPE_FUNCTION constexpr bits_t<T> check(const X&... x) const {
     static_assert((Limits::template among<Ks...> && ...),
                   "this limit names a kind that is not an input of the correlation");
-    return check_each<T, Ks...>(std::index_sequence_for<Limits...>{}, x...);
+    bits_t<T> bits(std::uint64_t{0});
+    int i = 0;
+    limits.each([&](const auto& l) {
+      bits = bits | one<T>(l, i, l.template number<Ks...>(x...));
+      ++i;
+    });
+    return bits;
   }
 
  private:
-  template <class T, class... Ks, std::size_t... Index, class... X>
-  CONVELOPE_FUNCTION constexpr bits_t<T> check_each(std::index_sequence<Index...>,
-                                                    const X&... x) const {
-    bits_t<T> bits(std::uint64_t{0});
-    ((bits = bits | one<T>(std::get<Index>(limits), static_cast<int>(Index),
-                           std::get<Index>(limits).template number<Ks...>(x...))),
-     ...);
-    return bits;
-  }
   // In positive form: `x >= low` is false for NaN, also where the compiler assumes there is none.
   template <class T, class L, class V>
   CONVELOPE_FUNCTION static constexpr bits_t<T> one(const L& l, int i, const V& v) {
@@ -110,8 +141,12 @@ struct envelope_of {
 };
 
 template <class... Limits>
-constexpr auto within(Limits... limits) {
-  return envelope_of<Limits...>{std::tuple<Limits...>(limits...)};
+constexpr envelope_of<Limits...> within(Limits... limits) {
+  if constexpr (sizeof...(Limits) == 0) {
+    return {};
+  } else {
+    return {detail::chain_of(limits...)};
+  }
 }
 
 }  // namespace v0

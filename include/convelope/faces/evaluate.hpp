@@ -213,7 +213,8 @@ CONVELOPE_FLATTEN void each(const Surface& given, const inputs_of<Number>& in_gi
     std::size_t i = 0;
     for (; i + lanes <= n; i += lanes) block<T>(s, in, out, i);
     if constexpr (lanes > 1) {
-      for (; i < n; ++i) block<Number>(s, in, out, i);
+      using one = std::conditional_t<std::is_same_v<array_number_t<T>, Number>, Number, double>;
+      for (; i < n; ++i) block<one>(s, in, out, i);
     }
   };
   if constexpr (std::is_trivially_copyable_v<Surface>) {
@@ -229,13 +230,19 @@ template <class E>
 constexpr bool takes_velocity = requires(const E& e) { e.velocity; };
 }  // namespace detail
 
-/// Asks a surface for every face. T = double (or float, with arrays of float) goes face by face; a
-/// pack type (faces::widest of convelope/faces/widest.hpp) goes lane by lane, remainder faces one
-/// by one.
-template <class T = double, wall_geometry G, fluid Fluid, class E>
+/// Asks a surface for every face. T = double goes face by face; a pack (faces::widest of
+/// convelope/faces/widest.hpp) as many at a time as it has lanes, remainder faces one by one: the
+/// same numbers to 1e-13 relative.
+///
+/// Single precision: `evaluate<faces::widest, float>` reads and writes arrays of float and computes
+/// in double, so that q, h and slope are right to the rounding of float (6e-8); `evaluate<float>`
+/// computes in float too, within 5e-6 in air and 5e-5 in water, relative to h for h and slope and
+/// to h |T_wall - T_stream| for q.
+template <class T = double, class Number = detail::array_number_t<T>, wall_geometry G, fluid Fluid,
+          class E>
 status evaluate(const wall_surface<G, Fluid, E>& s,
-                const std::type_identity_t<inputs_of<detail::array_number_t<T>>>& in,
-                const std::type_identity_t<outputs_of<detail::array_number_t<T>>>& out) {
+                const std::type_identity_t<inputs_of<Number>>& in,
+                const std::type_identity_t<outputs_of<Number>>& out) {
   const status found = detail::checked(in.wall_temperature_K.size(), in, out);
   if (found != status::done) return found;
   if (!detail::takes_velocity<E> && !in.velocity_m_s.empty()) return status::no_velocity;
@@ -245,11 +252,12 @@ status evaluate(const wall_surface<G, Fluid, E>& s,
 
 /// The same for many surfaces of one type: surface j has the faces from boundary[j] up to
 /// boundary[j + 1].
-template <class T = double, wall_geometry G, fluid Fluid, class E>
+template <class T = double, class Number = detail::array_number_t<T>, wall_geometry G, fluid Fluid,
+          class E>
 status evaluate_patches(std::span<const wall_surface<G, Fluid, E>> surfaces,
                         std::span<const std::size_t> boundary,
-                        const std::type_identity_t<inputs_of<detail::array_number_t<T>>>& in,
-                        const std::type_identity_t<outputs_of<detail::array_number_t<T>>>& out) {
+                        const std::type_identity_t<inputs_of<Number>>& in,
+                        const std::type_identity_t<outputs_of<Number>>& out) {
   const status found = detail::checked(in.wall_temperature_K.size(), in, out);
   if (found != status::done) return found;
   if (!detail::takes_velocity<E> && !in.velocity_m_s.empty()) return status::no_velocity;

@@ -16,14 +16,19 @@ struct array_number<std::experimental::simd<float, Abi>> {
   using type = float;
 };
 
-template <class Number, class Abi>
-struct face_access<std::experimental::simd<Number, Abi>> {
-  using pack = std::experimental::simd<Number, Abi>;
+// Arrays of another precision are converted as they are read and written.
+template <class Lane, class Abi>
+struct face_access<std::experimental::simd<Lane, Abi>> {
+  using pack = std::experimental::simd<Lane, Abi>;
+  template <class Number>
   static pack load(const column<const Number>& c, std::size_t i) {
     if (c.step() == 1) return pack(c.at(i), std::experimental::element_aligned);
-    return pack([&](auto lane) { return *c.at(i + lane); });
+    return pack([&](auto lane) { return static_cast<Lane>(*c.at(i + lane)); });
   }
-  static void store(const pack& x, const column<Number>& c, std::size_t i) { put(x, c, i); }
+  template <class Number>
+  static void store(const pack& x, const column<Number>& c, std::size_t i) {
+    put(x, c, i);
+  }
   static void store_bits(const bits_t<pack>& b, const column<std::uint64_t>& c, std::size_t i) {
     put(b, c, i);
   }
@@ -34,7 +39,8 @@ struct face_access<std::experimental::simd<Number, Abi>> {
     if (c.step() == 1) {
       x.copy_to(c.at(i), std::experimental::element_aligned);
     } else {
-      for (std::size_t lane = 0; lane < Pack::size(); ++lane) *c.at(i + lane) = x[lane];
+      for (std::size_t lane = 0; lane < Pack::size(); ++lane)
+        *c.at(i + lane) = static_cast<Element>(x[lane]);
     }
   }
 };

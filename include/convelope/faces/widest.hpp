@@ -13,8 +13,6 @@ namespace convelope {
 inline namespace v0 {
 namespace faces {
 using widest = std::experimental::native_simd<double>;
-using widest_float = std::conditional_t<convelope::detail::sized_packs_work,
-                                        std::experimental::native_simd<float>, float>;
 }  // namespace faces
 }  // namespace v0
 }  // namespace convelope
@@ -29,7 +27,6 @@ namespace convelope {
 inline namespace v0 {
 namespace faces {
 using widest = CONVELOPE_WIDEST;
-using widest_float = float;
 }  // namespace faces
 }  // namespace v0
 }  // namespace convelope

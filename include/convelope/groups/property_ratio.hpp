@@ -86,9 +86,12 @@ struct gnielinski_1976_liquid
   static constexpr double scatter = not_stated;
   static constexpr state_rule state_at = state_rule::bulk;
 
+  static constexpr double exponent = 0.11;
+
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Pr_b_over_Pr_w) {
-    return exp(T(0.11 * log(Pr_b_over_Pr_w)));
+    constexpr double n = exponent;
+    return exp(T(n * log(Pr_b_over_Pr_w)));
   }
 };
 
@@ -146,9 +149,12 @@ struct gnielinski_1976_gas
   static constexpr double scatter = not_stated;
   static constexpr state_rule state_at = state_rule::bulk;
 
+  static constexpr double exponent = 0.45;
+
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Tb_over_Tw) {
-    return exp(T(0.45 * log(smaller(Tb_over_Tw, T(1.0)))));
+    constexpr double n = exponent;
+    return exp(T(n * log(smaller(Tb_over_Tw, T(1.0)))));
   }
 };
 

@@ -10,7 +10,7 @@ namespace math {
 /// |x| rounded off near zero: sqrt(x^2 + r^2). Finite value and slope at x = 0.
 template <class T>
 CONVELOPE_FUNCTION constexpr T smooth_magnitude(const T& x, double r) {
-  return math::sqrt(T(x * x + r * r));
+  return math::sqrt(T(x * x + scalar_adaptor<T>::constant(r * r)));
 }
 template <class T, int Size>  // the same with fewer products
   requires(Size > 0)

@@ -3,6 +3,7 @@
 
 #include "convelope/correlations/external/cylinder_crossflow.hpp"
 #include "convelope/correlations/natural/horizontal_cylinder.hpp"
+#include "convelope/groups/state.hpp"
 #include "convelope/surfaces/buoyancy.hpp"
 
 namespace convelope {
@@ -32,7 +33,7 @@ struct cylinder_in_crossflow {
     const detail::usable_length d(diameter.si());
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
-    const T at = T(0.5 * (wall + ambient));
+    const T at = detail::state_of<forced, natural>(wall, ambient);
     const fluid_values<T> v = f.values(at, p);
     const T Pr = v.prandtl();
 

@@ -3,6 +3,8 @@
 
 #include "convelope/correlations/internal/parallel_plates.hpp"
 #include "convelope/correlations/internal/round_duct.hpp"
+#include "convelope/groups/property_ratio.hpp"
+#include "convelope/groups/state.hpp"
 #include "convelope/surfaces/film.hpp"
 
 namespace convelope {
@@ -32,7 +34,8 @@ CONVELOPE_FUNCTION constexpr film<T> duct_film(const Fluid& f, const duct_flow<T
 
   const T& bulk = s.temperature.si();
   const T& p = s.pressure.si();
-  const fluid_values<T> v = f.values(bulk, p);
+  const T at = state_of<laminar, turbulent>(wall, bulk);
+  const fluid_values<T> v = f.values(at, p);
   const T Pr = v.prandtl();
   const T Re = rounded_reynolds(v, s.velocity.si(), d.metres);
   const T one = adaptor::constant(1.0);
@@ -45,7 +48,9 @@ CONVELOPE_FUNCTION constexpr film<T> duct_film(const Fluid& f, const duct_flow<T
   } else {
     Pr_ratio = T(Pr / f.values(wall, p).prandtl());
   }
-  const T laminar_factor = is_gas<Fluid> ? one : math::exp(T(0.11 * math::log(Pr_ratio)));
+  static_assert(corrects_itself<turbulent>() && !corrects_itself<laminar>());
+  const T laminar_factor =
+      is_gas<Fluid> ? one : property_ratio::gnielinski_1976_liquid::formula(Pr_ratio);
 
   const T w = math::hand_over(Re, 2300.0, 4000.0);
   const T Re_turbulent = math::larger(Re, adaptor::constant(2300.0));
@@ -66,7 +71,7 @@ CONVELOPE_FUNCTION constexpr film<T> duct_film(const Fluid& f, const duct_flow<T
   const P turbulent_share = plain(w);
   const P laminar_share = complement(turbulent_share);
   const bits_t<T> bits(
-      bits_t<T>(d.bits | l.bits | end.bits | start_bits) | f.check(bulk, p) | f.check(wall, p) |
+      bits_t<T>(d.bits | l.bits | end.bits | start_bits) | f.check(at, p) | f.check(wall, p) |
       sound<T>(wall, bulk, p, s.velocity.si()) |
       Laminar::template verdict_bits<T>(0, laminar_share, Re, Pr, L_over_D) |
       asked<turbulent, T>(1, turbulent_share, Re, Pr, L_over_D, Pr_ratio, T_ratio));

@@ -15,7 +15,11 @@ inline constexpr typed<kinds::pressure> standard_pressure =
 namespace detail {
 template <class W, class K, class T>
 CONVELOPE_FUNCTION constexpr typed<K, W> converted(const typed<K, T>& x) {
-  return typed<K, W>::from_si(W(x.si()));
+  if constexpr (std::is_same_v<T, double>) {
+    return typed<K, W>::from_si(scalar_adaptor<W>::constant(x.si()));
+  } else {
+    return typed<K, W>::from_si(W(x.si()));
+  }
 }
 template <class T>
 CONVELOPE_FUNCTION constexpr typed<kinds::pressure, T> pressure_or_standard() {

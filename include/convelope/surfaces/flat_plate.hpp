@@ -2,6 +2,7 @@
 #define CONVELOPE_SURFACES_FLAT_PLATE_HPP
 
 #include "convelope/correlations/external/flat_plate.hpp"
+#include "convelope/groups/state.hpp"
 #include "convelope/surfaces/film.hpp"
 
 namespace convelope {
@@ -54,7 +55,7 @@ struct plate_along_stream {
     const detail::usable_transition turning(transition);
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
-    const T at = T(0.5 * (wall + ambient));
+    const T at = detail::state_of<layer_laminar, layer_turbulent>(wall, ambient);
     const fluid_values<T> v = f.values(at, p);
     const T Pr = v.prandtl();
     const T Re = detail::rounded_reynolds(v, s.velocity.si(), l.metres);

@@ -3,6 +3,7 @@
 
 #include "convelope/correlations/natural/horizontal_plate_down.hpp"
 #include "convelope/correlations/natural/horizontal_plate_up.hpp"
+#include "convelope/groups/state.hpp"
 #include "convelope/surfaces/buoyancy.hpp"
 #include "convelope/surfaces/flat_plate.hpp"
 
@@ -45,7 +46,7 @@ struct horizontal_wall {
     const detail::usable_transition turning(transition);
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
-    const T at = T(0.5 * (wall + ambient));
+    const T at = detail::state_of<driving, holding, forced, forced_turbulent>(wall, ambient);
     const fluid_values<T> v = f.values(at, p);
     const T Pr = v.prandtl();
 

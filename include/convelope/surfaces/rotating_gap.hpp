@@ -2,6 +2,7 @@
 #define CONVELOPE_SURFACES_ROTATING_GAP_HPP
 
 #include "convelope/correlations/external/annular_gap.hpp"
+#include "convelope/groups/state.hpp"
 #include "convelope/surfaces/film.hpp"
 
 namespace convelope {
@@ -32,7 +33,7 @@ struct rotating_inner_cylinder {
     const detail::usable_length b(gap.si());
     const T& outer = s.temperature.si();
     const T& p = s.pressure.si();
-    const T at = T(0.5 * (wall + outer));
+    const T at = detail::state_of<conduction, rotation>(wall, outer);
     const fluid_values<T> v = f.values(at, p);
     const T Pr = v.prandtl();
 

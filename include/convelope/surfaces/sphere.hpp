@@ -3,6 +3,7 @@
 
 #include "convelope/correlations/external/sphere.hpp"
 #include "convelope/correlations/natural/sphere_natural.hpp"
+#include "convelope/groups/state.hpp"
 #include "convelope/surfaces/buoyancy.hpp"
 
 namespace convelope {
@@ -31,9 +32,10 @@ struct sphere_in_stream {
     const detail::usable_length d(diameter.si());
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
-    const T at = T(0.5 * (wall + ambient));
+    const T at = detail::state_of<natural>(wall, ambient);
+    const T before = detail::state_of<forced>(wall, ambient);
     const fluid_values<T> at_film = f.values(at, p);
-    const fluid_values<T> at_stream = f.values(ambient, p);
+    const fluid_values<T> at_stream = f.values(before, p);
     const fluid_values<T> at_wall = f.values(wall, p);
 
     const T Re = detail::rounded_reynolds(at_stream, s.velocity.si(), d.metres);
@@ -53,7 +55,7 @@ struct sphere_in_stream {
     const P forced_share = P(plain(F4) / plain(sum));
     const P natural_share = P(plain(N4) / plain(sum));
     const bits_t<T> bits(bits_t<T>(d.bits) | f.check(at, p) | f.check(wall, p) |
-                         f.check(ambient, p) |
+                         f.check(before, p) |
                          detail::sound<T>(wall, ambient, p, s.velocity.si(), gravity.si()) |
                          detail::asked<forced, T>(0, forced_share, Re, Pr_stream, mu_ratio) |
                          detail::asked<natural, T>(1, natural_share, Ra, Pr_film));

@@ -2,6 +2,7 @@
 #define CONVELOPE_SURFACES_VERTICAL_CHANNEL_HPP
 
 #include "convelope/correlations/natural/vertical_channel.hpp"
+#include "convelope/groups/state.hpp"
 #include "convelope/surfaces/buoyancy.hpp"
 
 namespace convelope {
@@ -30,7 +31,7 @@ struct open_vertical_channel {
     const detail::usable_length h(height.si());
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
-    const T at = T(0.5 * (wall + ambient));
+    const T at = detail::state_of<natural>(wall, ambient);
     const fluid_values<T> v = f.values(at, p);
     const T Ra = detail::buoyancy<T>(f, v, wall, ambient, p, b.metres, gravity.si()).Ra;
     const T El = T(Ra * (b.metres / h.metres));

@@ -2,6 +2,7 @@
 #define CONVELOPE_SURFACES_VERTICAL_PLATE_HPP
 
 #include "convelope/correlations/natural/vertical_plate.hpp"
+#include "convelope/groups/state.hpp"
 #include "convelope/surfaces/buoyancy.hpp"
 #include "convelope/surfaces/flat_plate.hpp"
 
@@ -59,7 +60,8 @@ struct vertical_wall {
     const detail::usable_transition turning(transition);
     const T& ambient = s.temperature.si();
     const T& p = s.pressure.si();
-    const T at = T(0.5 * (wall + ambient));
+    const T at =
+        detail::state_of<natural_laminar, natural_all, forced, forced_turbulent>(wall, ambient);
     const fluid_values<T> v = f.values(at, p);
     const T Pr = v.prandtl();
     const T& u = s.velocity.si();

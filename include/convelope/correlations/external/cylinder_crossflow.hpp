@@ -66,7 +66,8 @@ struct churchill_bernstein_1977_midrange
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Re, const T& Pr) {
-    return T(0.3 + detail::crossflow_low(Re, Pr) * (1.0 + 1.88310894288677357e-03 * power<1, 2>(Re)));
+    return T(0.3 +
+             detail::crossflow_low(Re, Pr) * (1.0 + 1.88310894288677357e-03 * power<1, 2>(Re)));
   }
 };
 

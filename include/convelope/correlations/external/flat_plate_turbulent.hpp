@@ -148,7 +148,7 @@ struct petukhov_gnielinski_turbulent_average
   static constexpr auto envelope =
       within(limit<reynolds_of<plate_length>>(5e5, 1e7), limit<prandtl_number>(0.6, 2000.0));
   static constexpr double scatter = not_stated;
-  static constexpr state_rule state_at = state_rule::free_stream;
+  static constexpr state_rule state_at = state_rule::free_stream_with_wall;
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Re, const T& Pr) {
@@ -172,7 +172,7 @@ struct gnielinski_1975_combined_average
   static constexpr auto envelope =
       within(limit<reynolds_of<plate_length>>(10.0, 1e7), limit<prandtl_number>(0.6, 2000.0));
   static constexpr double scatter = not_stated;
-  static constexpr state_rule state_at = state_rule::free_stream;
+  static constexpr state_rule state_at = state_rule::free_stream_with_wall;
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Re, const T& Pr) {

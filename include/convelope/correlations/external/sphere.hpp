@@ -27,7 +27,7 @@ struct whitaker_1972 : correlation<whitaker_1972, nusselt_of<diameter>, reynolds
       within(limit<reynolds_of<diameter>>(3.5, 7.6e4), limit<prandtl_number>(0.71, 380.0),
              limit<viscosity_ratio>(1.0, 3.2));
   static constexpr double scatter = 0.3;
-  static constexpr state_rule state_at = state_rule::free_stream;
+  static constexpr state_rule state_at = state_rule::free_stream_with_wall;
 
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Re, const T& Pr, const T& mu_ratio) {

@@ -2,6 +2,7 @@
 #define CONVELOPE_CORRELATIONS_INTERNAL_ROUND_DUCT_LAMINAR_ENTRY_HPP
 
 #include "convelope/correlations/internal/round_duct_choices.hpp"
+#include "convelope/groups/property_ratio.hpp"
 #include "convelope/kinds.hpp"
 
 namespace convelope {
@@ -65,7 +66,7 @@ struct hausen_1943
   template <scalar T>
   CONVELOPE_FUNCTION static constexpr T formula(const T& Gz, const T& mu_b_over_mu_w) {
     const T entrance = T(0.0668 * Gz / (1.0 + 0.04 * power<2, 3>(Gz)));
-    return T((3.66 + entrance) * power<7, 50>(mu_b_over_mu_w));
+    return T((3.66 + entrance) * property_ratio::sieder_tate_1936::formula(mu_b_over_mu_w));
   }
 };
 

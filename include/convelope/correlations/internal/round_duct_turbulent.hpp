@@ -3,6 +3,7 @@
 
 #include "convelope/correlations/friction/solve.hpp"
 #include "convelope/correlations/internal/round_duct_choices.hpp"
+#include "convelope/groups/property_ratio.hpp"
 #include "convelope/kinds.hpp"
 
 namespace convelope {
@@ -112,7 +113,9 @@ struct gnielinski_1976
                                                 const T& Pr_b_over_Pr_w, const T& Tb_over_Tw) {
     const T developed =
         detail::petukhov::nusselt(1.0, detail::petukhov::root(1.82, 1.64, Re), T(Re - 1000.0), Pr);
-    const T K = exp(T(0.11 * log(Pr_b_over_Pr_w) + 0.45 * log(Tb_over_Tw)));
+    constexpr double of_liquid = property_ratio::gnielinski_1976_liquid::exponent;
+    constexpr double of_gas = property_ratio::gnielinski_1976_gas::exponent;
+    const T K = exp(T(of_liquid * log(Pr_b_over_Pr_w) + of_gas * log(Tb_over_Tw)));
     return T(developed * detail::petukhov::entrance(L_over_D) * K);
   }
 };
