@@ -101,9 +101,13 @@ constexpr double basic_uncertainty(basic b, const property_uncertainty& u) {
     case basic::Pr:
       break;
   }
-  return u.specific_heat < 0.0 || u.conductivity < 0.0 || u.viscosity < 0.0
-             ? not_stated
-             : u.specific_heat + u.conductivity + u.viscosity;
+  if (u.specific_heat < 0.0 || u.conductivity < 0.0 || u.viscosity < 0.0) return not_stated;
+  // As fluid_state: the root of the sum of squares, by Newton, since std::sqrt is not constexpr.
+  const double sum = u.specific_heat * u.specific_heat + u.conductivity * u.conductivity +
+                     u.viscosity * u.viscosity;
+  double root = u.specific_heat + u.conductivity + u.viscosity;
+  for (int i = 0; i < 8 && root > 0.0; ++i) root = 0.5 * (root + sum / root);
+  return root;
 }
 
 template <class Served>

@@ -21,6 +21,17 @@ concept constant_beside =
     std::is_same_v<S, T> || std::is_arithmetic_v<S> ||
     (!is_dual<S> && std::is_constructible_v<T, S> && !std::is_constructible_v<S, T>);
 
+// A slope that the compiler knows to be 0, of a number that does not vary with the variable: its
+// products can be left out, which IEEE 754 does not let a compiler do by itself.
+template <class T>
+CONVELOPE_FUNCTION constexpr bool no_slope([[maybe_unused]] const T& slope) {
+#if defined(__GNUC__) && !defined(__CUDACC__)
+  if constexpr (std::is_same_v<T, double>)
+    return __builtin_constant_p(slope == 0.0) && slope == 0.0;
+#endif
+  return false;
+}
+
 template <class T, class S>
 CONVELOPE_FUNCTION constexpr decltype(auto) as(const S& s) {
   if constexpr (std::is_same_v<S, T>) {
@@ -61,14 +72,20 @@ class dual {
   }
 
   CONVELOPE_FUNCTION friend constexpr dual operator+(const dual& a, const dual& b) {
-    return map(a, b, T(a.value + b.value), [](const T& x, const T& y) { return T(x + y); });
+    return map(a, b, T(a.value + b.value), [](const T& x, const T& y) {
+      return detail::no_slope(x) ? y : detail::no_slope(y) ? x : T(x + y);
+    });
   }
   CONVELOPE_FUNCTION friend constexpr dual operator-(const dual& a, const dual& b) {
-    return map(a, b, T(a.value - b.value), [](const T& x, const T& y) { return T(x - y); });
+    return map(a, b, T(a.value - b.value),
+               [](const T& x, const T& y) { return detail::no_slope(y) ? x : T(x - y); });
   }
   CONVELOPE_FUNCTION friend constexpr dual operator*(const dual& a, const dual& b) {
-    return map(a, b, T(a.value * b.value),
-               [&](const T& x, const T& y) { return T(x * b.value + a.value * y); });
+    return map(a, b, T(a.value * b.value), [&](const T& x, const T& y) {
+      return detail::no_slope(y)   ? T(x * b.value)
+             : detail::no_slope(x) ? T(a.value * y)
+                                   : T(x * b.value + a.value * y);
+    });
   }
   CONVELOPE_FUNCTION friend constexpr dual operator/(const dual& a, const dual& b) {
     const T r = T(detail::as<T>(1.0) / b.value);
@@ -104,7 +121,7 @@ class dual {
   template <detail::constant_beside<T> S>
   CONVELOPE_FUNCTION friend constexpr dual operator*(const dual& a, S b) {
     const T& c = detail::as<T>(b);
-    return a.chain(T(a.value * c), [&](const T& x) { return T(x * c); });
+    return a.chain(T(a.value * c), [&](const T& x) { return detail::no_slope(x) ? x : T(x * c); });
   }
   template <detail::constant_beside<T> S>
   CONVELOPE_FUNCTION friend constexpr dual operator*(S a, const dual& b) {

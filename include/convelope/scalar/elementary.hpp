@@ -6,6 +6,10 @@
 
 #include "convelope/scalar/power.hpp"
 
+#if defined(__SSE2__) && !defined(__CUDACC__)
+#include <emmintrin.h>
+#endif
+
 // exp, log, cbrt and rational powers without a branch or a table, on double and on packs of it,
 // whose own library would go lane by lane. All they need is arithmetic, comparison and bits of the
 // whole pack at a time.
@@ -248,6 +252,15 @@ struct elementary {
 /// The standard library's sqrt, exp and log are fast one at a time; its cbrt and pow are not.
 template <>
 struct scalar_adaptor<double> : basic_adaptor<double> {
+#if defined(__SSE2__) && !defined(__CUDACC__)
+  // std::sqrt sets errno for negative numbers: a branch to a call, around which every register is
+  // saved.
+  static double sqrt(double x) {
+    if (__builtin_constant_p(x)) return std::sqrt(x);  // computed by the compiler
+    const __m128d v = _mm_set_sd(x);
+    return _mm_cvtsd_f64(_mm_sqrt_sd(v, v));
+  }
+#endif
   CONVELOPE_FUNCTION static double cbrt(double x) { return detail::elementary<double>::cbrt(x); }
   template <int P, int Q>
   CONVELOPE_FUNCTION static constexpr double power(double x) {

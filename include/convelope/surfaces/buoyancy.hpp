@@ -45,8 +45,9 @@ struct buoyancy {
                                         double g) {
     const double k = g * length * length * length;
     const T dT = T(wall - ambient);
-    const T per_beta = T(k * dT * at_film.density * at_film.density * at_film.specific_heat /
-                         (at_film.viscosity * at_film.conductivity));
+    // Gr Pr, of groups that Re and the laws need too.
+    const T per_nu = T(at_film.density / at_film.viscosity);
+    const T per_beta = T(k * dT * T(per_nu * per_nu) * at_film.prandtl());
     const T given = T(per_beta * expansion_by_rule(f, at_film, ambient, p));
     if constexpr (requires { Fluid::expansion_slope; }) {
       const T square = T(given * given + least_rayleigh * least_rayleigh);

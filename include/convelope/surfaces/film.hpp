@@ -78,7 +78,7 @@ constexpr bool is_gas = Fluid::expansion_at == expansion_rule::ambient;
 template <class T>
 CONVELOPE_FUNCTION constexpr T rounded_reynolds(const fluid_values<T>& v, const T& u,
                                                 double length) {
-  return math::smooth_magnitude(T(length * v.density * u / v.viscosity), least_reynolds);
+  return math::smooth_magnitude(T(T(u * length) * T(v.density / v.viscosity)), least_reynolds);
 }
 
 /// A length to divide by: itself if positive and finite, else 1 m, with `impossible` in the bits.
