@@ -2,7 +2,8 @@
 #define CONVELOPE_CONVELOPE_HPP
 
 // All of the library but the lists for callers that know names only at run time (catalogue.hpp),
-// which instantiate every correlation, and what needs <string> (estimate/explain.hpp, throwing.hpp).
+// which instantiate every correlation, and what needs <string> (estimate/explain.hpp,
+// throwing.hpp).
 
 #include "convelope/boundary.hpp"
 #include "convelope/correlations.hpp"
