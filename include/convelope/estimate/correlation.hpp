@@ -77,18 +77,11 @@ CONVELOPE_FUNCTION constexpr auto tested(const In& in) {
 }
 
 template <class K, class Envelope, class X>
-CONVELOPE_FUNCTION constexpr X clamped(const Envelope& envelope, const X& x) {
+CONVELOPE_FUNCTION constexpr X held_inside(const Envelope& envelope, const X& x) {
   if constexpr (is_choice<K>) {
     return x;
   } else {
-    X y = x;
-    envelope.limits.each([&](const auto& l) {
-      if constexpr (std::remove_cvref_t<decltype(l)>::template bounds<K>) {
-        y = math::smaller(math::larger(y, scalar_adaptor<X>::constant(l.low)),
-                          scalar_adaptor<X>::constant(l.high));
-      }
-    });
-    return y;
+    return envelope.limits.template clamp<K>(x);
   }
 }
 }  // namespace detail
@@ -153,8 +146,7 @@ inline constexpr auto input_table = C::with_input_kinds([]<class... K>() {
 template <class C>
 inline constexpr auto limit_table = [] {
   std::array<limit_info, (C::envelope.count == 0 ? 1 : C::envelope.count)> table{};
-  std::size_t i = 0;
-  C::envelope.limits.each([&](const auto& l) { table[i++] = {l.symbol, l.low, l.high}; });
+  C::envelope.limits.describe(table.data());
   return table;
 }();
 
@@ -273,7 +265,7 @@ struct correlation_on : formula_functions {
         return Self::template formula<W>();
       } else if constexpr (Policy::clamps) {
         return W(Self::formula(
-            detail::clamped<Inputs>(Self::envelope, detail::argument<W, Inputs>(in))...));
+            detail::held_inside<Inputs>(envelope, detail::argument<W, Inputs>(in))...));
       } else {
         return W(Self::formula(detail::argument<W, Inputs>(in)...));
       }

@@ -1,6 +1,9 @@
 #ifndef CONVELOPE_ESTIMATE_ENVELOPE_HPP
 #define CONVELOPE_ESTIMATE_ENVELOPE_HPP
 
+#include <tuple>
+#include <utility>
+
 #include "convelope/estimate/info.hpp"
 #include "convelope/estimate/verdict.hpp"
 #include "convelope/kinds/typed.hpp"
@@ -17,15 +20,6 @@ constexpr int index_of_kind() {
   return found;
 }
 
-template <int I, class First, class... Rest>
-CONVELOPE_FUNCTION constexpr auto nth(const First& first, const Rest&... rest) {
-  if constexpr (I == 0) {
-    return first;
-  } else {
-    return nth<I - 1>(rest...);
-  }
-}
-
 template <class K>
 struct limit_on_input {
   double low;
@@ -35,7 +29,7 @@ struct limit_on_input {
   template <class... Ks, class... X>
   CONVELOPE_FUNCTION constexpr auto number(const X&... x) const {
     constexpr int i = among<Ks...> ? index_of_kind<K, Ks...>() : 0;
-    return nth<i>(x...);
+    return std::get<static_cast<std::size_t>(i)>(std::tie(x...));
   }
   template <class... Ks>
   static constexpr bool among = index_of_kind<K, Ks...>() >= 0;
@@ -75,30 +69,66 @@ constexpr auto limit_on(const char* symbol, double low, double high, Group group
 }
 
 namespace detail {
-// Limits one after the other. A std::tuple makes a geometry's header a tenth dearer to include.
-template <class... Limits>
-struct limit_chain {
-  template <class Use>
-  CONVELOPE_FUNCTION constexpr void each(Use) const {}
-};
-template <class First, class... Rest>
-struct limit_chain<First, Rest...> {
-  First first;
-  limit_chain<Rest...> rest;
-  template <class Use>
-  CONVELOPE_FUNCTION constexpr void each(Use use) const {
-    use(first);
-    rest.each(use);
+// In positive form: `x >= low` is false for NaN, also where the compiler assumes there is none.
+template <class T, class L, class V>
+CONVELOPE_FUNCTION constexpr bits_t<T> crossed(const L& l, int i, const V& v) {
+  using adaptor = scalar_adaptor<V>;
+  bits_t<T> bits(std::uint64_t{0});
+  if (l.low > -unbounded) {
+    bits = bits | adaptor::bits_where(!(v >= adaptor::constant(l.low)),
+                                      detail::word::of_correlation(0, i, side::below));
   }
-};
-template <class First, class... Rest>
-constexpr limit_chain<First, Rest...> chain_of(const First& first, const Rest&... rest) {
-  if constexpr (sizeof...(Rest) == 0) {
-    return {first, {}};
+  if (l.high < unbounded) {
+    bits = bits | adaptor::bits_where(!(v <= adaptor::constant(l.high)),
+                                      detail::word::of_correlation(0, i, side::above));
+  }
+  return bits;
+}
+
+template <class K, class L, class X>
+CONVELOPE_FUNCTION constexpr X clamped(const L& l, const X& x) {
+  if constexpr (L::template bounds<K>) {
+    return math::smaller(math::larger(x, scalar_adaptor<X>::constant(l.low)),
+                         scalar_adaptor<X>::constant(l.high));
   } else {
-    return {first, chain_of(rest...)};
+    return x;
   }
 }
+
+// Limits by number. A std::tuple makes a geometry's header a tenth dearer to include.
+template <int Number, class Limit>
+struct numbered_limit {
+  Limit limit;
+};
+template <class Numbers, class... Limits>
+struct limit_set;
+template <int... Number, class... Limits>
+struct limit_set<std::integer_sequence<int, Number...>, Limits...>
+    : numbered_limit<Number, Limits>... {
+  constexpr explicit limit_set(const Limits&... limits)
+      : numbered_limit<Number, Limits>{limits}... {}
+
+  constexpr void describe(limit_info* to) const {
+    ((to[Number] = {numbered_limit<Number, Limits>::limit.symbol,
+                    numbered_limit<Number, Limits>::limit.low,
+                    numbered_limit<Number, Limits>::limit.high}),
+     ...);
+  }
+  /// x moved to the nearest limit on its kind K.
+  template <class K, class X>
+  CONVELOPE_FUNCTION constexpr X clamp(X x) const {
+    ((x = clamped<K>(numbered_limit<Number, Limits>::limit, x)), ...);
+    return x;
+  }
+  template <class T, class... Ks, class... X>
+  CONVELOPE_FUNCTION constexpr bits_t<T> check(const X&... x) const {
+    bits_t<T> bits(std::uint64_t{0});
+    ((bits = bits | crossed<T>(numbered_limit<Number, Limits>::limit, Number,
+                               numbered_limit<Number, Limits>::limit.template number<Ks...>(x...))),
+     ...);
+    return bits;
+  }
+};
 }  // namespace detail
 
 /// The range a formula was fitted in: up to six limits, tested in the caller's own numbers.
@@ -106,47 +136,21 @@ template <class... Limits>
 struct envelope_of {
   static_assert(sizeof...(Limits) <= detail::word::limits_per_slot, "at most six limits");
   static constexpr int count = static_cast<int>(sizeof...(Limits));
-  detail::limit_chain<Limits...> limits;
+  detail::limit_set<std::make_integer_sequence<int, count>, Limits...> limits;
 
   /// Verdict bits (in slot 0) for inputs x of kinds Ks, as numbers of type T.
   template <class T, class... Ks, class... X>
   CONVELOPE_FUNCTION constexpr bits_t<T> check(const X&... x) const {
     static_assert((Limits::template among<Ks...> && ...),
                   "this limit names a kind that is not an input of the correlation");
-    bits_t<T> bits(std::uint64_t{0});
-    int i = 0;
-    limits.each([&](const auto& l) {
-      bits = bits | one<T>(l, i, l.template number<Ks...>(x...));
-      ++i;
-    });
-    return bits;
-  }
-
- private:
-  // In positive form: `x >= low` is false for NaN, also where the compiler assumes there is none.
-  template <class T, class L, class V>
-  CONVELOPE_FUNCTION static constexpr bits_t<T> one(const L& l, int i, const V& v) {
-    using adaptor = scalar_adaptor<V>;
-    bits_t<T> bits(std::uint64_t{0});
-    if (l.low > -unbounded) {
-      bits = bits | adaptor::bits_where(!(v >= adaptor::constant(l.low)),
-                                        detail::word::of_correlation(0, i, side::below));
-    }
-    if (l.high < unbounded) {
-      bits = bits | adaptor::bits_where(!(v <= adaptor::constant(l.high)),
-                                        detail::word::of_correlation(0, i, side::above));
-    }
-    return bits;
+    return limits.template check<T, Ks...>(x...);
   }
 };
 
 template <class... Limits>
 constexpr envelope_of<Limits...> within(Limits... limits) {
-  if constexpr (sizeof...(Limits) == 0) {
-    return {};
-  } else {
-    return {detail::chain_of(limits...)};
-  }
+  using set = decltype(envelope_of<Limits...>::limits);
+  return {set(limits...)};
 }
 
 }  // namespace v0
