@@ -32,4 +32,18 @@ TEST_CASE("xsimd batches of faces: every remainder, contiguous and in cells") {
     }
   }
 }
+#else
+#include "convelope/faces/widest.hpp"
+#include "convelope/surfaces/cylinder.hpp"
+#include "many.hpp"
+
+using namespace many;
+
+TEST_CASE("without xsimd there is a widest pack all the same") {
+  const auto tube = surface(cylinder_in_crossflow{number<kinds::diameter>(0.03)}, dry_air_fast{},
+                            exposure<cylinder_in_crossflow, double>(2.0, 300.0, 101325.0));
+  arrays a(19, 31);
+  CHECK(faces::evaluate<faces::widest>(tube, a.in(), a.out()) == faces::status::done);
+  expect_as_alone(tube, a);
+}
 #endif
