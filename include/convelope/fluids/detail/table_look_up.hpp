@@ -173,11 +173,11 @@ V cubic(const V& c0, const V& c1, const V& c2, const V& c3, const V& x) {
 }
 // Coefficients `step` apart.
 template <class V>
-V cubic(const double* c, int step, const V& x) {
+V cubic(const double* c, std::ptrdiff_t step, const V& x) {
   return V(c[0] + x * (c[step] + x * (c[2 * step] + x * c[3 * step])));
 }
 template <class V>
-V cubic_slope(const double* c, int step, const V& x) {
+V cubic_slope(const double* c, std::ptrdiff_t step, const V& x) {
   return V(c[step] + x * (2.0 * c[2 * step] + x * (3.0 * c[3 * step])));
 }
 
@@ -190,8 +190,8 @@ void evaluate_cell(const double* c, const V& t, table_values<V>& y) {
 template <class V>
 void evaluate_cell(const double* c, const V& t, const V& s, table_values<V>& y) {
   V x[4][4];
-  for (int a = 0; a < 4; ++a) {
-    for (int j = 0; j < 4; ++j) x[a][j] = cubic(c + 4 * a + j, 16, s);
+  for (std::ptrdiff_t a = 0; a < 4; ++a) {
+    for (std::ptrdiff_t j = 0; j < 4; ++j) x[a][j] = cubic(c + 4 * a + j, 16, s);
   }
   V fifth[4];
   for (int a = 0; a < 4; ++a) fifth[a] = cubic(c + 64 + a, 4, s);
