@@ -48,7 +48,7 @@ struct dry_air : detail::ideal_air<detail::dry_air_info> {
                                                       const T& pressure_Pa) const {
     const T& t = temperature_K;
     const T inverse = T(1.0 / t);
-    const T root = math::sqrt(t);
+    const T root = math::power<1, 2>(t);  // its slope shares 1/t
 
     // 0.0266958 sqrt(M) / sigma^2, sigma = 0.360 nm; log(132.6312 / 103.3)
     const T reduced = math::log(T(t * (1.0 / 132.6312)));
@@ -77,7 +77,7 @@ struct dry_air_fast : detail::ideal_air<detail::dry_air_fast_info> {
     const T& t = temperature_K;
     const T inverse = T(1.0 / t);
     const T x = T((t - 600.0) / (t + 600.0));
-    const T root = math::sqrt(t);
+    const T root = math::power<1, 2>(t);  // its slope shares 1/t
     const T cp =
         math::polynomial(x, 1.051207756e+03, 2.777177730e+02, 4.344173448e+02, -2.357082856e+02,
                          -8.815870604e+02, 2.491843220e+02, 9.622736931e+02);
