@@ -16,6 +16,7 @@
 #include <vector>
 
 #include "convelope/catalogue/catalogue.hpp"
+#include "convelope/catalogue/fluid_entry.hpp"
 #include "convelope/catalogue/text.hpp"
 
 using namespace convelope;

@@ -7,6 +7,7 @@
 #include <cmath>
 
 #include "check.hpp"
+#include "convelope/correlations/friction/rough_duct.hpp"
 
 using namespace convelope;
 using check::above;

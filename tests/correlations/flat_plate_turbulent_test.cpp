@@ -1,3 +1,5 @@
+#include "convelope/correlations/external/flat_plate_turbulent.hpp"
+
 #include <cmath>
 
 #include "check.hpp"

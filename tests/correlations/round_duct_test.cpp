@@ -8,6 +8,8 @@
 
 #include "../first_principles/graetz.hpp"
 #include "check.hpp"
+#include "convelope/correlations/internal/round_duct_choices.hpp"
+#include "convelope/correlations/internal/round_duct_transition.hpp"
 
 using namespace convelope;
 using check::above;

@@ -8,6 +8,7 @@
 #include <type_traits>
 
 #include "check.hpp"
+#include "convelope/correlations/natural/vertical_channel_isoflux.hpp"
 
 namespace {
 

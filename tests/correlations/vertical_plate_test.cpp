@@ -8,6 +8,7 @@
 #include <type_traits>
 
 #include "check.hpp"
+#include "convelope/correlations/natural/thin_layer.hpp"
 
 namespace {
 

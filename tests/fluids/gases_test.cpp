@@ -6,6 +6,8 @@
 #include "close_to.hpp"
 #include "convelope/fluids/argon.hpp"
 #include "convelope/fluids/carbon_dioxide.hpp"
+#include "convelope/fluids/detail/dilute_gas.hpp"
+#include "convelope/fluids/detail/gas_equations.hpp"
 #include "convelope/fluids/helium.hpp"
 #include "convelope/fluids/hydrogen.hpp"
 #include "convelope/fluids/nitrogen.hpp"

@@ -7,6 +7,7 @@
 #include "close_to.hpp"
 #include "convelope/catalogue/find.hpp"
 #include "convelope/catalogue/fluids_water.hpp"
+#include "convelope/fluids/detail/iapws_conductivity.hpp"
 
 using namespace convelope;
 

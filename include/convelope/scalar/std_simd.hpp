@@ -22,7 +22,7 @@ inline constexpr bool sized_packs_work = true;
 template <class Pack>
 Pack blend(const typename Pack::mask_type& m, const Pack& yes, const Pack& no) {
 #if defined(__clang__) && defined(__AVX512VL__)
-  // libstdc++ up to 14 takes one lane's choice for all here (a FIXME of its own).
+  // libstdc++ 12 takes one lane's choice for all lanes here.
   if constexpr (std::is_trivially_copyable_v<Pack> && sizeof(m) <= 2) {
     constexpr bool wide = sizeof(typename Pack::value_type) == 8;
     if constexpr (sizeof(Pack) == 64) {
